@@ -1,0 +1,93 @@
+#include "registry/equilibrium.hpp"
+
+#include <boost/math/tools/toms748_solve.hpp>
+
+#include <algorithm>
+#include <cmath>
+#include <cstdint>
+
+namespace entropy_ledger::registry {
+
+namespace {
+
+// Below this entropy of transition relative to the entropy itself, the Gibbs curves touch rather than cross.
+constexpr double touching = 1e-6;
+
+std::optional<double> nominal_temperature(const Substance& substance, const Phase& first, const Phase& second)
+{
+    for (const Transition& t : substance.transitions) {
+        const Phase* below = &substance.phases[t.from];
+        const Phase* above = &substance.phases[t.to];
+        if ((below == &first && above == &second) || (below == &second && above == &first))
+            return t.nominal_temperature;
+    }
+    return std::nullopt;
+}
+
+using Policy = boost::math::policies::policy<
+    boost::math::policies::domain_error<boost::math::policies::ignore_error>,
+    boost::math::policies::evaluation_error<boost::math::policies::ignore_error>>;
+
+template <class Function>
+double root(const Function& difference, double lower, double upper, double at_lower, double at_upper)
+{
+    if (at_lower == 0.0)
+        return lower;
+    if (at_upper == 0.0)
+        return upper;
+    std::uintmax_t steps = 100;
+    const auto tolerance = [](double a, double b) { return std::abs(b - a) <= 4e-16 * std::abs(a); };
+    const auto bracket
+        = boost::math::tools::toms748_solve(difference, lower, upper, at_lower, at_upper, tolerance, steps, Policy());
+    return 0.5 * (bracket.first + bracket.second);
+}
+
+} // namespace
+
+std::optional<double> equilibrium_temperature(const Substance& substance, const Phase& first, const Phase& second,
+                                              double p)
+{
+    if (&first == &second || !(p > 0.0))
+        return std::nullopt;
+    const Range a = limits_of(first, p).trust;
+    const Range b = limits_of(second, p).trust;
+    if (a.empty() || b.empty())
+        return std::nullopt;
+    const Range common{std::max(a.lower, b.lower), std::min(a.upper, b.upper)};
+    if (common.empty())
+        return std::nullopt;
+    const auto difference = [&](double T) { return gibbs_energy(first, T, p) - gibbs_energy(second, T, p); };
+
+    // Near the temperature at which the source lets the two meet.
+    const auto nominal = nominal_temperature(substance, first, second);
+    if (nominal && common.contains(*nominal)) {
+        const double step = entropy(second, *nominal, p) - entropy(first, *nominal, p);
+        if (std::abs(step) < touching * std::abs(entropy(first, *nominal, p)))
+            return *nominal;
+        for (double width = 1e-3; width <= 64.0; width *= 4.0) {
+            const double lower = std::max(common.lower, *nominal - width);
+            const double upper = std::min(common.upper, *nominal + width);
+            const double at_lower = difference(lower);
+            const double at_upper = difference(upper);
+            if (at_lower * at_upper <= 0.0)
+                return root(difference, lower, upper, at_lower, at_upper);
+        }
+    }
+
+    // Anywhere in the common range: the first change of sign on a grid of equal ratios.
+    constexpr int cells = 96;
+    const double ratio = std::pow(common.upper / common.lower, 1.0 / cells);
+    double lower = common.lower;
+    double at_lower = difference(lower);
+    for (int i = 1; i <= cells; ++i) {
+        const double upper = i == cells ? common.upper : common.lower * std::pow(ratio, i);
+        const double at_upper = difference(upper);
+        if (at_lower * at_upper <= 0.0)
+            return root(difference, lower, upper, at_lower, at_upper);
+        lower = upper;
+        at_lower = at_upper;
+    }
+    return std::nullopt;
+}
+
+} // namespace entropy_ledger::registry
