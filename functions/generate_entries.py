@@ -1,0 +1,87 @@
+"""Generates, from the catalogue, the C++ table of the cell functions.
+
+usage: generate_entries.py OUTPUT_DIRECTORY
+Writes function_id.hpp (the identifiers), keys.hpp (the arguments) and entries.inc (the table, included by call.cpp).
+"""
+
+import sys
+from pathlib import Path
+
+from catalogue import load
+
+
+def quoted(text: str) -> str:
+    return '"' + text.replace("\\", "\\\\").replace('"', '\\"') + '"'
+
+
+def write(path: Path, text: str) -> None:
+    if not path.exists() or path.read_text(encoding="utf-8") != text:
+        path.write_text(text, encoding="utf-8")
+
+
+def main() -> None:
+    out = Path(sys.argv[1])
+    out.mkdir(parents=True, exist_ok=True)
+    catalogue = load()
+    head = "// Generated from functions/catalogue.toml.\n"
+
+    ids = ",\n".join(f"    {f.identifier}" for f in catalogue.functions)
+    write(out / "function_id.hpp", f"""{head}#pragma once
+
+#include <cstddef>
+#include <cstdint>
+
+namespace entropy_ledger::functions {{
+
+enum class FunctionId : std::uint16_t {{
+{ids}
+}};
+
+inline constexpr std::size_t function_count = {len(catalogue.functions)};
+
+}} // namespace entropy_ledger::functions
+""")
+
+    keys = ",\n".join(f"    {k}" for k in catalogue.argument_keys)
+    write(out / "keys.hpp", f"""{head}#pragma once
+
+#include <cstddef>
+#include <cstdint>
+
+namespace entropy_ledger::functions {{
+
+// The arguments of the catalogue.
+enum class Key : std::uint8_t {{
+{keys}
+}};
+
+inline constexpr std::size_t key_count = {len(catalogue.argument_keys)};
+
+}} // namespace entropy_ledger::functions
+""")
+
+    lines = [head]
+    for f in catalogue.functions:
+        lines.append(f"constexpr ArgumentEntry arguments_{f.identifier}[] = {{")
+        for a in f.arguments:
+            flag = "repeated" if a.repeated else "optional" if a.optional else "required"
+            lines.append(f"    {{Key::{a.key}, {quoted(a.name)}, Need::{flag}}},")
+        lines.append("};")
+    lines.append("constexpr Entry entries[] = {")
+    for f in catalogue.functions:
+        if f.process:
+            handler = f"&show_process<views::{f.view.capitalize()}, processes::{f.process.capitalize()}>"
+            group = "nullptr"
+        elif any(a.repeated for a in f.arguments):
+            handler = "nullptr"
+            group = f"&plain::{f.identifier}"
+        else:
+            handler = f"&plain::{f.identifier}"
+            group = "nullptr"
+        lines.append(f"    {{{quoted(f.name)}, arguments_{f.identifier}, "
+                     f"places(arguments_{f.identifier}), ResultKind::{f.result}, {handler}, {group}}},")
+    lines.append("};")
+    write(out / "entries.inc", "\n".join(lines) + "\n")
+
+
+main()

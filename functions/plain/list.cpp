@@ -1,0 +1,77 @@
+#include "functions/plain/plain.hpp"
+#include "functions/reader.hpp"
+
+#include <algorithm>
+#include <string>
+
+namespace entropy_ledger::functions::plain {
+
+namespace {
+
+constexpr const char* headings[] = {"state", "name", "formula", "from, K", "to, K", "trusted from, K", "trusted to, K",
+    "uncertainty of cp, %", "uncertainty is", "molar mass, g/mol", "source"};
+constexpr std::size_t columns = std::size(headings);
+
+bool holds(std::string_view text, std::string_view part)
+{
+    const auto same = [](char a, char b) {
+        const auto lower = [](char c) { return c >= 'A' && c <= 'Z' ? static_cast<char>(c - 'A' + 'a') : c; };
+        return lower(a) == lower(b);
+    };
+    return std::search(text.begin(), text.end(), part.begin(), part.end(), same) != text.end();
+}
+
+const char* shown_origin(registry::Origin origin)
+{
+    switch (origin) {
+    case registry::Origin::stated: return "stated by the source";
+    case registry::Origin::derived: return "derived";
+    case registry::Origin::assigned: return "assigned here";
+    }
+    return "";
+}
+
+} // namespace
+
+Result data_list(const Entry& entry, std::span<const Cell> cells)
+{
+    Reader reader(entry, cells, false);
+    const std::string_view filter = reader.given(Key::filter) ? reader.text(Key::filter) : std::string_view();
+    if (reader.refused())
+        return reader.refusal().error;
+
+    MixedTable table;
+    table.columns = columns;
+    table.rows = 1;
+    for (const char* heading : headings)
+        table.cells.emplace_back(std::string(heading));
+    for (const registry::Substance& substance : registry::substances()) {
+        for (const registry::Phase& phase : substance.phases) {
+            const std::string state = shown_state(substance, phase);
+            if (!holds(state, filter) && !holds(substance.title, filter) && !holds(substance.formula, filter))
+                continue;
+            const registry::Limits limits = registry::limits_of(phase, standard_pressure);
+            table.cells.emplace_back(state);
+            table.cells.emplace_back(std::string(substance.title));
+            table.cells.emplace_back(std::string(substance.formula));
+            for (const double end : {limits.fit.lower, limits.fit.upper, limits.trust.lower, limits.trust.upper})
+                table.cells.emplace_back(end);
+            table.cells.emplace_back(100.0 * phase.uncertainty.relative);
+            table.cells.emplace_back(std::string(shown_origin(phase.uncertainty.origin)));
+            if (substance.molar_mass > 0.0)
+                table.cells.emplace_back(1000.0 * substance.molar_mass);
+            else
+                table.cells.emplace_back(std::string());
+            std::string keys;
+            for (const registry::Source* source : registry::sources_of(phase))
+                keys += (keys.empty() ? "" : "; ") + std::string(source->key);
+            table.cells.emplace_back(std::move(keys));
+            ++table.rows;
+        }
+    }
+    if (table.rows == 1)
+        return error_number(ErrorCode::not_available);
+    return table;
+}
+
+} // namespace entropy_ledger::functions::plain

@@ -1,0 +1,155 @@
+// The path of a change of state, step by step, for STEPS.
+#include "functions/processes/state_change.hpp"
+#include "registry/equilibrium.hpp"
+
+#include <optional>
+#include <vector>
+
+namespace entropy_ledger::functions {
+
+namespace {
+
+using registry::Aggregation;
+using registry::Phase;
+using registry::Substance;
+
+// What a phase change is called, by the states of aggregation.
+const char* name_of_change(Aggregation from, Aggregation to)
+{
+    if (from == to)
+        return "change of modification";
+    if (from == Aggregation::crystal)
+        return to == Aggregation::liquid ? "melting" : "sublimation";
+    if (from == Aggregation::liquid)
+        return to == Aggregation::crystal ? "freezing" : "boiling";
+    return to == Aggregation::liquid ? "condensation" : "deposition";
+}
+
+// Visits the step from one point to the next, unless nothing happens.
+class StepMaker {
+public:
+    StepMaker(const Substance& substance, double mass, const StepVisitor& visit)
+        : substance_(substance), mass_(mass), visit_(visit) {}
+
+    void operator()(const Point<double>& from, const Point<double>& to) const
+    {
+        if (from.phase == to.phase && from.T == to.T && from.p == to.p)
+            return;
+        Step step;
+        step.T_start = from.T;
+        step.T_end = to.T;
+        step.p = to.p;
+        step.heat = mass_ * (enthalpy(*to.phase, to.T, to.p) - enthalpy(*from.phase, from.T, from.p));
+        step.entropy = mass_ * (entropy(*to.phase, to.T, to.p) - entropy(*from.phase, from.T, from.p));
+        step.state = shown_state(substance_, *from.phase);
+        if (from.phase != to.phase) {
+            step.what = name_of_change(from.phase->aggregation, to.phase->aggregation);
+            step.state += " → " + shown_state(substance_, *to.phase);
+        } else if (from.T == to.T) {
+            step.what = "change of pressure";
+        } else {
+            step.what = from.T < to.T ? "heating" : "cooling";
+        }
+        const std::string first{source_of(*from.phase, from.T, from.p).key};
+        const std::string last{source_of(*to.phase, to.T, to.p).key};
+        step.source = first == last ? first : first + "; " + last;
+        visit_(step);
+    }
+
+private:
+    const Substance& substance_;
+    double mass_;
+    const StepVisitor& visit_;
+};
+
+std::size_t index_of(const Substance& substance, const Phase* phase)
+{
+    return static_cast<std::size_t>(phase - substance.phases.data());
+}
+
+bool has_value(const Phase& phase, double T, double p) { return limits_of(phase, p).trust.contains(T); }
+
+// The phases from first to last, in the order in which they are passed at pressure p, with the temperatures at which
+// one gives way to the next. A phase that is nowhere stable between its neighbours is left out. Empty temperatures
+// when some neighbours have no equilibrium within their ranges.
+struct Crossing {
+    std::vector<const Phase*> phases;
+    std::vector<double> temperatures;
+};
+
+std::optional<Crossing> crossing(const Substance& substance, const Phase* first, const Phase* last, double p,
+                                 bool directly)
+{
+    Crossing path;
+    std::size_t i = index_of(substance, first);
+    const std::size_t end = index_of(substance, last);
+    const bool upwards = i < end;
+    for (; i != end; i = upwards ? i + 1 : i - 1) {
+        if (!directly || path.phases.empty())
+            path.phases.push_back(&substance.phases[i]);
+    }
+    path.phases.push_back(last);
+    for (;;) {
+        path.temperatures.clear();
+        for (std::size_t k = 0; k + 1 < path.phases.size(); ++k) {
+            const auto T = equilibrium_temperature(substance, *path.phases[k], *path.phases[k + 1], p);
+            if (!T)
+                return std::nullopt;
+            path.temperatures.push_back(*T);
+        }
+        std::size_t k = 0;
+        while (k + 1 < path.temperatures.size()
+               && (upwards ? path.temperatures[k] <= path.temperatures[k + 1]
+                           : path.temperatures[k] >= path.temperatures[k + 1]))
+            ++k;
+        if (k + 1 >= path.temperatures.size())
+            return path;
+        path.phases.erase(path.phases.begin() + static_cast<std::ptrdiff_t>(k + 1));
+    }
+}
+
+// From one phase to another at one pressure.
+void visit_phases(const StepMaker& step, const Substance& substance, const Point<double>& start,
+                  const Point<double>& end, bool directly)
+{
+    const auto path = crossing(substance, start.phase, end.phase, start.p, directly);
+    Point<double> here = start;
+    if (path) {
+        for (std::size_t k = 0; k < path->temperatures.size(); ++k) {
+            const Point<double> before{path->phases[k], path->temperatures[k], start.p};
+            const Point<double> after{path->phases[k + 1], path->temperatures[k], start.p};
+            step(here, before);
+            step(before, after);
+            here = after;
+        }
+    } else if (has_value(*end.phase, start.T, start.p)) {
+        const Point<double> after{end.phase, start.T, start.p};
+        step(here, after);
+        here = after;
+    } else if (has_value(*start.phase, end.T, start.p)) {
+        const Point<double> before{start.phase, end.T, start.p};
+        step(here, before);
+        here = before;
+    }
+    step(here, end);
+}
+
+} // namespace
+
+void visit_path(const Substance& substance, const Point<double>& start, const Point<double>& end, double mass,
+                const StepVisitor& visit)
+{
+    const StepMaker step(substance, mass, visit);
+    // The change of pressure first, where the phase at the start has values at the final pressure, else last.
+    const bool pressure_first = has_value(*start.phase, start.T, end.p);
+    const Point<double> begin{start.phase, start.T, pressure_first ? end.p : start.p};
+    const Point<double> finish{end.phase, end.T, begin.p};
+    step(start, begin);
+    if (start.phase == end.phase)
+        step(begin, finish);
+    else // a change at one temperature does not detour through a third phase
+        visit_phases(step, substance, begin, finish, start.T == end.T);
+    step(finish, end);
+}
+
+} // namespace entropy_ledger::functions

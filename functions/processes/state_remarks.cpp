@@ -1,0 +1,107 @@
+// What there is to say about a change of state: sources, states beyond a fitted range, states away from equilibrium,
+// and the cautions for states that can hurt someone.
+#include "functions/cautions.hpp"
+#include "functions/processes/state_change.hpp"
+#include "functions/wording.hpp"
+#include "registry/equilibrium.hpp"
+
+#include <cmath>
+
+namespace entropy_ledger::functions {
+
+namespace {
+
+using registry::Aggregation;
+using registry::Phase;
+using registry::Substance;
+
+// This close to equilibrium, in K, a state counts as at equilibrium: 0 °C is meant as the freezing point of water. It also
+// covers the few millikelvin within which the Gibbs energies of the IAPWS R7-97 regions meet.
+constexpr double at_equilibrium = 0.02;
+
+// The phase of lowest Gibbs energy at (T, p), if it is lower than that of `phase` by more than rounding; else null.
+const Phase* more_stable(const Substance& substance, const Phase& phase, double T, double p)
+{
+    const double own = gibbs_energy(phase, T, p);
+    double lowest = own - 1e-9 * (std::abs(enthalpy(phase, T, p)) + T * std::abs(entropy(phase, T, p)));
+    const Phase* stable = nullptr;
+    for (const Phase& other : substance.phases) {
+        if (&other == &phase || !limits_of(other, p).trust.contains(T))
+            continue;
+        const double g = gibbs_energy(other, T, p);
+        if (g < lowest) {
+            lowest = g;
+            stable = &other;
+        }
+    }
+    return stable;
+}
+
+const char* kind_of_metastability(Aggregation phase, Aggregation stable)
+{
+    if (phase == Aggregation::liquid)
+        return stable == Aggregation::crystal ? "undercooled liquid" : "superheated liquid";
+    if (phase == Aggregation::crystal)
+        return stable == Aggregation::crystal ? "modification outside its stable range" : "superheated solid";
+    return "supersaturated vapour";
+}
+
+void remark_on_range(const Substance& substance, const Point<double>& point, Remarks& remarks)
+{
+    const registry::Limits limits = limits_of(*point.phase, point.p);
+    if (limits.fit.contains(point.T))
+        return;
+    const bool below = point.T < limits.fit.lower;
+    const double edge = below ? limits.fit.lower : limits.fit.upper;
+    const registry::Uncertainty& u = point.phase->uncertainty;
+    const double beyond = std::abs(point.T - edge);
+    if (beyond <= at_equilibrium)
+        return;
+    remarks.reserve(shown_state(substance, *point.phase) + " at " + shown_temperature(point.T) + " is "
+                    + shown(beyond, 3) + " K " + (below ? "below" : "above") + " the range of its source ("
+                    + shown_temperature(edge) + "); the standard uncertainty of its heat capacity grows there from "
+                    + shown(100.0 * u.relative, 2) + " % to " + shown(100.0 * (u.relative + u.growth * beyond), 2)
+                    + " %");
+}
+
+void remark_on_stability(const Substance& substance, const Point<double>& point, Remarks& remarks)
+{
+    const Phase* stable = more_stable(substance, *point.phase, point.T, point.p);
+    if (!stable)
+        return;
+    const Aggregation own = point.phase->aggregation;
+    const auto T_equilibrium = equilibrium_temperature(substance, *point.phase, *stable, point.p);
+    if (T_equilibrium && std::abs(point.T - *T_equilibrium) <= at_equilibrium)
+        return;
+    std::string text = shown_state(substance, *point.phase) + " at " + shown_temperature(point.T) + " and "
+                     + shown_pressure(point.p) + ": " + kind_of_metastability(own, stable->aggregation);
+    if (T_equilibrium)
+        text += ", " + shown(std::abs(point.T - *T_equilibrium), 3) + " K away from equilibrium with "
+              + shown_state(substance, *stable) + " at " + shown_temperature(*T_equilibrium);
+    remarks.reserve(std::move(text));
+    if (own == Aggregation::liquid)
+        remarks.caution(stable->aggregation == Aggregation::crystal ? cautions::undercooled_liquid
+                                                                    : cautions::superheated_liquid);
+}
+
+void remark_on_point(const Substance& substance, const Point<double>& point, Remarks& remarks)
+{
+    remarks.source(source_of(*point.phase, point.T, point.p));
+    remark_on_range(substance, point, remarks);
+    remark_on_stability(substance, point, remarks);
+    for (const char* caution : cautions::of_state(substance, *point.phase, point.T, point.p))
+        remarks.caution(caution);
+    if (const std::string_view which = formulation_of(*point.phase, point.T, point.p); !which.empty())
+        remarks.note(shown_state(substance, *point.phase) + " by " + std::string(which));
+}
+
+} // namespace
+
+void remark_on_change(const Substance& substance, const Point<double>& start, const Point<double>& end,
+                      Remarks& remarks)
+{
+    remark_on_point(substance, start, remarks);
+    remark_on_point(substance, end, remarks);
+}
+
+} // namespace entropy_ledger::functions

@@ -1,0 +1,43 @@
+#include "functions/remarks.hpp"
+
+#include <algorithm>
+
+namespace entropy_ledger::functions {
+
+namespace {
+
+std::string joined(const std::vector<std::string>& list)
+{
+    std::string text;
+    for (const std::string& item : list)
+        text += (text.empty() ? "" : "; ") + item;
+    return text;
+}
+
+} // namespace
+
+void Remarks::add(std::vector<std::string>& list, std::string text)
+{
+    if (std::find(list.begin(), list.end(), text) == list.end())
+        list.push_back(std::move(text));
+}
+
+void Remarks::source(const registry::Source& source) { add(sources_, std::string(source.citation)); }
+void Remarks::source(std::string_view text) { add(sources_, std::string(text)); }
+void Remarks::note(std::string text) { add(notes_, std::move(text)); }
+void Remarks::reserve(std::string text) { add(reservations_, std::move(text)); }
+void Remarks::caution(std::string text) { add(cautions_, std::move(text)); }
+
+std::string Remarks::sources() const { return joined(sources_); }
+
+std::string Remarks::summary() const
+{
+    std::string text = reservations_.empty() && cautions_.empty() ? "ok" : "note: " + joined(reservations_);
+    if (!cautions_.empty())
+        text = (reservations_.empty() ? "" : text + ". ") + "CAUTION: " + joined(cautions_);
+    if (!notes_.empty())
+        text += (text == "ok" ? ": " : ". ") + joined(notes_);
+    return text;
+}
+
+} // namespace entropy_ledger::functions

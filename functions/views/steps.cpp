@@ -1,0 +1,44 @@
+#include "functions/views/views.hpp"
+
+namespace entropy_ledger::functions::views {
+
+namespace {
+
+constexpr std::size_t columns = 8;
+
+void append(MixedTable& table, const Step& step)
+{
+    table.cells.emplace_back(step.what);
+    table.cells.emplace_back(step.state);
+    table.cells.emplace_back(step.T_start);
+    table.cells.emplace_back(step.T_end);
+    if (step.p > 0.0)
+        table.cells.emplace_back(step.p);
+    else
+        table.cells.emplace_back(std::string());
+    table.cells.emplace_back(step.heat);
+    table.cells.emplace_back(step.entropy);
+    table.cells.emplace_back(step.source);
+    ++table.rows;
+}
+
+} // namespace
+
+Result steps_table(const std::function<void(const StepVisitor&)>& steps, bool rate, double heat,
+                   std::optional<double> T_reservoir)
+{
+    MixedTable table;
+    table.columns = columns;
+    for (const char* heading : {"step", "state", "from, K", "to, K", "pressure, Pa", rate ? "heat, W" : "heat, J",
+                                rate ? "entropy, W/K" : "entropy, J/K", "source"})
+        table.cells.emplace_back(std::string(heading));
+    table.rows = 1;
+    steps([&](const Step& step) { append(table, step); });
+    if (T_reservoir) {
+        const double T = *T_reservoir;
+        append(table, {heat > 0.0 ? "heat leaves" : "heat enters", "reservoir", T, T, 0.0, -heat, -heat / T, {}});
+    }
+    return table;
+}
+
+} // namespace entropy_ledger::functions::views

@@ -1,0 +1,106 @@
+// The views: what is asked of a process. Each has
+//   template <class Process> static Result show(const Process&, std::optional<double> T_reservoir);
+//   static Result refused(const Refusal&);
+//   static constexpr bool wants_words;  // whether reasons of refusals are worth making
+#pragma once
+
+#include "functions/processes/step.hpp"
+#include "functions/refusal.hpp"
+#include "functions/value.hpp"
+#include "functions/views/generation.hpp"
+#include "functions/wording.hpp"
+
+#include <cmath>
+#include <optional>
+
+namespace entropy_ledger::functions::views {
+
+// A number for a cell: an overflow is an error, never infinity.
+inline Result finite(double x)
+{
+    return std::isfinite(x) ? x : error_number(ErrorCode::unusable_argument);
+}
+
+// Whether the numbers of a process fit into a double: a huge amount may overflow.
+template <class Process>
+bool is_finite(const Process& process)
+{
+    return std::isfinite(process.entropy().value) && std::isfinite(process.heat().value);
+}
+
+struct NumberView {
+    static constexpr bool wants_words = false;
+    static Result refused(const Refusal& refusal) { return refusal.error; }
+};
+
+struct Entropy : NumberView {
+    template <class Process>
+    static Result show(const Process& process, std::optional<double>)
+    {
+        return finite(process.entropy().value);
+    }
+};
+
+struct Heat : NumberView {
+    template <class Process>
+    static Result show(const Process& process, std::optional<double>)
+    {
+        return finite(process.heat().value);
+    }
+};
+
+struct Generation : NumberView {
+    template <class Process>
+    static Result show(const Process& process, std::optional<double> T_reservoir)
+    {
+        return finite(generation(process.entropy(), process.heat(), *T_reservoir));
+    }
+};
+
+// Table of the steps. With a reservoir its own row comes last, so that the entropy column adds up to the generation.
+Result steps_table(const std::function<void(const StepVisitor&)>& steps, bool rate, double heat,
+                   std::optional<double> T_reservoir);
+
+struct Steps : NumberView {
+    template <class Process>
+    static Result show(const Process& process, std::optional<double> T_reservoir)
+    {
+        if (!is_finite(process))
+            return error_number(ErrorCode::unusable_argument);
+        return steps_table([&](const StepVisitor& visit) { process.steps(visit); }, process.rate(),
+                           process.heat().value, T_reservoir);
+    }
+};
+
+struct Source : NumberView {
+    template <class Process>
+    static Result show(const Process& process, std::optional<double>)
+    {
+        if (!is_finite(process))
+            return error_number(ErrorCode::unusable_argument);
+        Remarks remarks;
+        process.remarks(remarks);
+        return remarks.sources();
+    }
+};
+
+struct Check {
+    static constexpr bool wants_words = true;
+
+    // An error in an argument passes through: there is no more to say of it than Calc does.
+    static Result refused(const Refusal& refusal) { return "refused: " + refusal.reason; }
+
+    template <class Process>
+    static Result show(const Process& process, std::optional<double> T_reservoir)
+    {
+        if (!is_finite(process))
+            return "refused: the result is too large for a number; the amount or the heat is out of all bounds";
+        Remarks remarks;
+        process.remarks(remarks);
+        if (T_reservoir && generation(process.entropy(), process.heat(), *T_reservoir) < 0.0)
+            remarks.reserve("the generation is negative: with this reservoir the duty cannot occur as specified");
+        return remarks.summary();
+    }
+};
+
+} // namespace entropy_ledger::functions::views
