@@ -422,8 +422,8 @@ def write_fingerprint(records, substances, path):
     taken = [r for r in records if any(id(i) in state_of for i in r.intervals)]
     with open(path, "w", encoding="utf-8") as out:
         out.write("# Written by registry/carry_over_nasa.py from the published set. A line a record: the published\n"
-                  "# name, then for each interval the state of ours that holds it and, in hexadecimal, the 32-bit FNV-1a of\n"
-                  "# 'molar-mass lower upper a1 ... a7 b1 b2' with the published digits, e for D.\n")
+                  "# name, then for each interval the state of ours that holds it and, in hexadecimal, the 32-bit\n"
+                  "# FNV-1a of 'molar-mass lower upper a1 ... a7 b1 b2' with the published digits, e for D.\n")
         out.write(f"records {len(taken)} intervals {sum(len(r.intervals) for r in taken)}\n")
         for record in taken:
             parts = [record.published]
