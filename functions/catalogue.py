@@ -5,6 +5,10 @@ from dataclasses import dataclass
 from pathlib import Path
 
 
+# Kinds of arguments that take a range as a whole; ranges in other arguments are spread, one result a cell.
+WHOLE_RANGES = {"items", "amounts", "substances", "capacities", "temperatures"}
+
+
 @dataclass(frozen=True)
 class Argument:
     key: str        # entry of [arguments]

@@ -29,7 +29,7 @@ struct Entry {
     std::array<signed char, key_count> place; // of each key in the argument list; -1 where the function lacks it
     ResultKind result;
     CellHandler handler; // called with single cells; ranges are spread over it
-    GroupHandler group;  // in its stead, for a function that takes ranges as a whole
+    GroupHandler group;  // in its stead, for a function that takes its ranges as a whole
 };
 
 inline constexpr std::size_t most_arguments = 12;

@@ -7,7 +7,7 @@ Writes function_id.hpp (the identifiers), keys.hpp (the arguments) and entries.i
 import sys
 from pathlib import Path
 
-from catalogue import load
+from catalogue import WHOLE_RANGES, load
 
 
 def quoted(text: str) -> str:
@@ -69,15 +69,13 @@ inline constexpr std::size_t key_count = {len(catalogue.argument_keys)};
         lines.append("};")
     lines.append("constexpr Entry entries[] = {")
     for f in catalogue.functions:
+        whole = any(a.kind in WHOLE_RANGES for a in f.arguments)
         if f.process:
-            handler = f"&show_process<views::{f.view.capitalize()}, processes::{f.process.capitalize()}>"
-            group = "nullptr"
-        elif any(a.repeated for a in f.arguments):
-            handler = "nullptr"
-            group = f"&plain::{f.identifier}"
+            show = "show_whole_process" if whole else "show_process"
+            function = f"&{show}<views::{f.view.capitalize()}, processes::{f.process.capitalize()}>"
         else:
-            handler = f"&plain::{f.identifier}"
-            group = "nullptr"
+            function = f"&plain::{f.identifier}"
+        handler, group = ("nullptr", function) if whole else (function, "nullptr")
         lines.append(f"    {{{quoted(f.name)}, arguments_{f.identifier}, "
                      f"places(arguments_{f.identifier}), ResultKind::{f.result}, {handler}, {group}}},")
     lines.append("};")

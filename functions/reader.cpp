@@ -116,8 +116,11 @@ double Reader::reservoir_temperature(Key key)
 
 double Reader::pressure(Key key, double when_left_out)
 {
-    if (!given(key) || refused_)
-        return when_left_out;
+    return given(key) ? required_pressure(key) : when_left_out;
+}
+
+double Reader::required_pressure(Key key)
+{
     const auto pascal = flow(key, "a pressure in Pa", [](const Dimension& d) -> std::optional<bool> {
         return d == dimensions::pressure ? std::optional(false) : std::nullopt;
     });
@@ -249,6 +252,27 @@ Amount<double> Reader::amount(Key key, const registry::Substance* substance)
         refuse(ErrorCode::unusable_argument, key,
                [] { return "is 0, or its cell is empty; write \"0 kg\" for an amount of nothing"; });
     return {molar ? q.value * substance->molar_mass : q.value, rate};
+}
+
+Flow<double> Reader::moles(Key key, const registry::Substance* substance, bool converts)
+{
+    const Quantity q = quantity(key, converts ? "an amount in kg" : "an amount in mol");
+    if (refused_)
+        return {0.0, false};
+    const Dimension& d = q.dimension;
+    const bool rate = q.has_unit && (d == dimensions::mass_rate || d == dimensions::molar_rate);
+    const bool molar = q.has_unit ? d == dimensions::amount_of_substance || d == dimensions::molar_rate : !converts;
+    if (!molar && q.has_unit && d != dimensions::mass && d != dimensions::mass_rate)
+        refuse(ErrorCode::unusable_argument, key,
+               [] { return "has a unit of another kind; wanted: mol, kg, mol/s or kg/s"; });
+    else if (!molar && !converts)
+        refuse(ErrorCode::unusable_argument, key,
+               [] { return "is a mass, and without substances there is no molar mass to convert it; give mol"; });
+    else if (!molar && !(substance && substance->molar_mass > 0.0))
+        refuse(ErrorCode::unusable_argument, key, [] { return "the molar mass of the substance is not known; give mol"; });
+    else if (q.value < 0.0)
+        refuse(ErrorCode::unusable_argument, key, [&] { return "is " + shown(q.value) + "; an amount is not negative"; });
+    return {molar || refused_ ? q.value : q.value / substance->molar_mass, rate};
 }
 
 void Reader::admit(const registry::Substance* substance, const registry::Phase& phase, double T, double p, Key key)

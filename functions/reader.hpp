@@ -47,6 +47,7 @@ public:
     double temperature(Key key);                     // K, above 0
     double reservoir_temperature(Key key);           // K, above 0 and at most hottest_reservoir
     double pressure(Key key, double when_left_out);  // Pa, above 0
+    double required_pressure(Key key);               // Pa, above 0
     Flow<double> heat(Key key);                      // J or W
     Flow<double> heat_capacity(Key key);             // J/K or W/K, above 0
     Flow<double> entropy(Key key);                   // J/K or W/K
@@ -57,6 +58,10 @@ public:
     State state(Key key);
     State state(const registry::Substance* substance, Key symbol);
     Amount<double> amount(Key key, const registry::Substance* substance); // above 0
+
+    // Amount in mol. With `converts`, a plain number is kg as usual and a mass is converted by the molar mass of
+    // `substance`; without, a plain number is mol and a mass is refused. Not negative; 0 is allowed.
+    Flow<double> moles(Key key, const registry::Substance* substance, bool converts);
 
     // Refuses unless `phase` has values at (T, p); `key` names the temperature argument.
     void admit(const registry::Substance* substance, const registry::Phase& phase, double T, double p, Key key);

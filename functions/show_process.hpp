@@ -1,7 +1,7 @@
 // A view of a process, from the cells of one call to its result.
 #pragma once
 
-#include "functions/reader.hpp"
+#include "functions/whole_reader.hpp"
 
 #include <optional>
 
@@ -22,6 +22,19 @@ Result show_process(const Entry& entry, std::span<const Cell> cells)
     if (reader.refused())
         return View::refused(reader.refusal());
     return View::show(process, T_reservoir);
+}
+
+// The same for a process that takes ranges as a whole and has its reservoirs, if any, inside.
+template <class View, template <class> class Process>
+Result show_whole_process(const Entry& entry, std::span<const Argument> arguments)
+{
+    if (arguments.size() > entry.arguments.size())
+        return error_number(ErrorCode::unusable_argument);
+    WholeReader reader(entry, arguments, View::wants_words);
+    const auto process = Process<WholeReader::Number>::read(reader);
+    if (reader.refused())
+        return View::refused(reader.refusal());
+    return View::show(process, std::nullopt);
 }
 
 } // namespace entropy_ledger::functions

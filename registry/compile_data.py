@@ -10,7 +10,6 @@ import sys
 from dataclasses import dataclass, field
 from decimal import Decimal, InvalidOperation
 
-MOST_INTERVALS = 9  # of a record: NasaPolynomial keeps the bounds between them on the stack, eight of them
 
 CODE_MODELS = {"liquid-water": "LiquidWater", "ice-ih": "IceIh", "steam": "Steam"}
 MODELS = {"nasa-polynomial", "constant-heat-capacity", *CODE_MODELS}
@@ -272,8 +271,6 @@ def check_intervals(phase):
     for below, above in zip(phase.intervals, phase.intervals[1:]):
         if Decimal(below.bounds[1]) != Decimal(above.bounds[0]):
             above.line.fail(f"a gap or an overlap: the interval before ends at {below.bounds[1]} K")
-    if len(phase.intervals) > MOST_INTERVALS:
-        phase.line.fail(f"more than {MOST_INTERVALS} intervals")
 
 
 def check(data):
@@ -379,7 +376,7 @@ def floating(text):
     return text if any(c in text for c in ".eE") else text + ".0"
 
 
-def model_text(data, substance, phase, first_interval):
+def model_text(data, substance, phase, first_interval, first_bound):
     model = phase.values["model"]
     if model in CODE_MODELS:
         return f"{CODE_MODELS[model]}{{}}"
@@ -387,8 +384,8 @@ def model_text(data, substance, phase, first_interval):
     source = data.sources[phase.values["source"]].cpp
     if model == "nasa-polynomial":
         gas = "true" if phase.aggregation == "gas" else "false"
-        return (f"NasaPolynomial{{intervals + {first_interval}, {len(phase.intervals)}, "
-                f"{floating(substance.values['molar-mass'])}, {gas}, {{{trust}}}, &{source}}}")
+        return (f"NasaPolynomial{{intervals + {first_interval}, bounds + {first_bound}, {len(phase.intervals)}, "
+                f"nasa_gas_constant / {floating(substance.values['molar-mass'])}, {gas}, {{{trust}}}, &{source}}}")
     fit = ", ".join(map(floating, phase.values["fit"]))
     reference = ", ".join(map(floating, phase.values["reference"]))
     return (f"ConstantHeatCapacity{{{floating(phase.values['heat-capacity'])}, {reference}, {{{fit}}}, {{{trust}}}, "
@@ -400,7 +397,7 @@ def uncertainty_text(data, phase):
     base = data.uncertainties[name].cpp
     if not growth:
         return base
-    return f"{{{base}.relative, {floating(growth[1])}, {base}.origin, {base}.reason}}"
+    return f"{{{base}.relative, {floating(growth[1])}, {floating(growth[1])}, {base}.origin, {base}.reason}}"
 
 
 def emit(data):
@@ -423,16 +420,17 @@ def emit(data):
         item.cpp = item.values.get("declared", f"uncertainty_{i}")
         if "declared" not in item.values:
             out.append(f"constexpr Uncertainty uncertainty_{i}{{{floating(item.values['relative'])}, "
-                       f"{floating(item.values['growth'])}, Origin::{item.values['origin']}, "
+                       f"{floating(item.values['growth'])}, {floating(item.values['growth'])}, Origin::{item.values['origin']}, "
                        f"{quoted(item.values['reason'])}}};")
-    intervals, phases, transitions, substances = [], [], [], []
+    intervals, bounds, phases, transitions, substances = [], [], [], [], []
     for substance in ordered:
         first_phase, first_transition = len(phases), len(transitions)
         for phase in substance.phases:
-            model = model_text(data, substance, phase, len(intervals))
+            model = model_text(data, substance, phase, len(intervals), len(bounds))
+            bounds += [floating(interval.bounds[1]) + "," for interval in phase.intervals[:-1]]
             for interval in phase.intervals:
-                bounds, a, b = (", ".join(map(floating, x)) for x in (interval.bounds, interval.a, interval.b))
-                intervals.append(f"{{{bounds}, {{{a}}}, {b}}},")
+                ends, a, b = (", ".join(map(floating, x)) for x in (interval.bounds, interval.a, interval.b))
+                intervals.append(f"{{{ends}, {{{a}}}, {b}}},")
             phases.append(f"{{{quoted(phase.symbol)}, Aggregation::{phase.aggregation}, {model}, "
                           f"{uncertainty_text(data, phase)}, {quoted(phase.values.get('remark', ''))}}},")
         symbols = [p.symbol for p in substance.phases]
@@ -444,7 +442,7 @@ def emit(data):
         substances.append(f"{{{quoted(substance.name)}, {quoted(substance.values.get('formula', ''))}, "
                           f"{quoted(substance.values.get('title', ''))}, "
                           f"{floating(substance.values.get('molar-mass', '0'))}, {spans}}},")
-    for kind, name, rows in (("NasaInterval", "intervals", intervals), ("Phase", "phases", phases),
+    for kind, name, rows in (("NasaInterval", "intervals", intervals), ("double", "bounds", bounds), ("Phase", "phases", phases),
                              ("Transition", "transitions", transitions), ("Substance", "all", substances)):
         out += ["", f"constinit const {kind} {name}[] = {{", *rows, "};"] if rows else []
     for name, table in (("exact", exact), ("folded", fold)):

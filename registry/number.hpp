@@ -24,6 +24,9 @@ inline double value_of(double x) { return x; }
 // A bound belongs to the interval above it. Bounds ascend.
 inline std::size_t interval_of(double x, std::span<const double> bounds)
 {
+    constexpr std::size_t few = 16; // up to here counting along is the faster way
+    if (bounds.size() > few)
+        return static_cast<std::size_t>(std::upper_bound(bounds.begin(), bounds.end(), x) - bounds.begin());
     std::size_t index = 0;
     while (index < bounds.size() && x >= bounds[index])
         ++index;

@@ -22,7 +22,8 @@ enum class Origin {
 // Uncertainty of a phase's heat capacity.
 struct Uncertainty {
     double relative;          // standard uncertainty of the heat capacity, relative, inside the fitted range
-    double growth;            // added to it for each kelvin beyond the fitted range, 1/K
+    double growth_below;      // added to it for each kelvin below the fitted range, 1/K
+    double growth_above;      // added to it for each kelvin above the fitted range, 1/K
     Origin origin;
     std::string_view reason;  // the statement of the source, or the reason of the assignment
 };
@@ -56,6 +57,9 @@ Limits limits_of(const Phase& phase, double p);
 
 // The source that answers at (T, p).
 const Source& source_of(const Phase& phase, double T, double p);
+
+// Whether entropy depends on pressure in the phase's model.
+bool depends_on_pressure(const Phase& phase);
 
 // All the sources that may answer for the phase, each once.
 std::span<const Source* const> sources_of(const Phase& phase);

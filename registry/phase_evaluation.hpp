@@ -71,6 +71,14 @@ inline const Source& source_of(const Phase& phase, double T, double p)
     return std::visit([&](const auto& model) -> const Source& { return model.source(T, p); }, phase.model);
 }
 
+inline bool depends_on_pressure(const Phase& phase)
+{
+    if (std::holds_alternative<ConstantHeatCapacity>(phase.model))
+        return false;
+    const auto* polynomial = std::get_if<NasaPolynomial>(&phase.model);
+    return !polynomial || polynomial->gas;
+}
+
 inline std::span<const Source* const> sources_of(const Phase& phase)
 {
     return std::visit([](const auto& model) { return model.sources(); }, phase.model);

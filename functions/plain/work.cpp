@@ -5,6 +5,12 @@
 
 namespace entropy_ledger::functions::plain {
 
+namespace {
+
+Result finite_or_error(double x) { return std::isfinite(x) ? x : error_number(ErrorCode::unusable_argument); }
+
+} // namespace
+
 Result work_lost(const Entry& entry, std::span<const Cell> cells)
 {
     Reader reader(entry, cells, false);
@@ -13,7 +19,29 @@ Result work_lost(const Entry& entry, std::span<const Cell> cells)
     const double work = T * generation;
     if (reader.refused())
         return reader.refusal().error;
-    return std::isfinite(work) ? work : error_number(ErrorCode::unusable_argument);
+    return finite_or_error(work);
+}
+
+Result work_available(const Entry& entry, std::span<const Cell> cells)
+{
+    Reader reader(entry, cells, false);
+    const double heat = reader.heat(Key::heat_balance).value;
+    const double entropy = reader.entropy(Key::entropy_change).value;
+    const double T = reader.reservoir_temperature(Key::T_ambient);
+    if (reader.refused())
+        return reader.refusal().error;
+    return finite_or_error(heat - T * entropy);
+}
+
+Result work_least(const Entry& entry, std::span<const Cell> cells)
+{
+    Reader reader(entry, cells, false);
+    const double heat = reader.heat(Key::heat).value;
+    const double T = reader.reservoir_temperature(Key::T);
+    const double T_ambient = reader.reservoir_temperature(Key::T_ambient);
+    if (reader.refused())
+        return reader.refusal().error;
+    return finite_or_error(std::abs(heat) * std::abs(T - T_ambient) / T);
 }
 
 } // namespace entropy_ledger::functions::plain

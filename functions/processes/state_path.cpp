@@ -1,9 +1,6 @@
 // The path of a change of state, step by step, for STEPS.
 #include "functions/processes/state_change.hpp"
-#include "registry/equilibrium.hpp"
-
-#include <optional>
-#include <vector>
+#include "registry/phase_sequence.hpp"
 
 namespace entropy_ledger::functions {
 
@@ -62,57 +59,13 @@ private:
     const StepVisitor& visit_;
 };
 
-std::size_t index_of(const Substance& substance, const Phase* phase)
-{
-    return static_cast<std::size_t>(phase - substance.phases.data());
-}
-
 bool has_value(const Phase& phase, double T, double p) { return limits_of(phase, p).trust.contains(T); }
-
-// The phases from first to last, in the order in which they are passed at pressure p, with the temperatures at which
-// one gives way to the next. A phase that is nowhere stable between its neighbours is left out. Empty temperatures
-// when some neighbours have no equilibrium within their ranges.
-struct Crossing {
-    std::vector<const Phase*> phases;
-    std::vector<double> temperatures;
-};
-
-std::optional<Crossing> crossing(const Substance& substance, const Phase* first, const Phase* last, double p,
-                                 bool directly)
-{
-    Crossing path;
-    std::size_t i = index_of(substance, first);
-    const std::size_t end = index_of(substance, last);
-    const bool upwards = i < end;
-    for (; i != end; i = upwards ? i + 1 : i - 1) {
-        if (!directly || path.phases.empty())
-            path.phases.push_back(&substance.phases[i]);
-    }
-    path.phases.push_back(last);
-    for (;;) {
-        path.temperatures.clear();
-        for (std::size_t k = 0; k + 1 < path.phases.size(); ++k) {
-            const auto T = equilibrium_temperature(substance, *path.phases[k], *path.phases[k + 1], p);
-            if (!T)
-                return std::nullopt;
-            path.temperatures.push_back(*T);
-        }
-        std::size_t k = 0;
-        while (k + 1 < path.temperatures.size()
-               && (upwards ? path.temperatures[k] <= path.temperatures[k + 1]
-                           : path.temperatures[k] >= path.temperatures[k + 1]))
-            ++k;
-        if (k + 1 >= path.temperatures.size())
-            return path;
-        path.phases.erase(path.phases.begin() + static_cast<std::ptrdiff_t>(k + 1));
-    }
-}
 
 // From one phase to another at one pressure.
 void visit_phases(const StepMaker& step, const Substance& substance, const Point<double>& start,
                   const Point<double>& end, bool directly)
 {
-    const auto path = crossing(substance, start.phase, end.phase, start.p, directly);
+    const auto path = registry::phase_sequence(substance, *start.phase, *end.phase, start.p, directly);
     Point<double> here = start;
     if (path) {
         for (std::size_t k = 0; k < path->temperatures.size(); ++k) {

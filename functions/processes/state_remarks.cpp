@@ -55,12 +55,13 @@ void remark_on_range(const Substance& substance, const Point<double>& point, Rem
     const double edge = below ? limits.fit.lower : limits.fit.upper;
     const registry::Uncertainty& u = point.phase->uncertainty;
     const double beyond = std::abs(point.T - edge);
+    const double grown = u.relative + beyond * (below ? u.growth_below : u.growth_above);
     if (beyond <= at_equilibrium)
         return;
     remarks.reserve(shown_state(substance, *point.phase) + " at " + shown_temperature(point.T) + " is "
                     + shown(beyond, 3) + " K " + (below ? "below" : "above") + " the range of its source ("
                     + shown_temperature(edge) + "); the standard uncertainty of its heat capacity grows there from "
-                    + shown(100.0 * u.relative, 2) + " % to " + shown(100.0 * (u.relative + u.growth * beyond), 2)
+                    + shown(100.0 * u.relative, 2) + " % to " + shown(100.0 * grown, 2)
                     + " %");
 }
 

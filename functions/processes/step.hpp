@@ -30,8 +30,8 @@ struct Term {
 struct Step {
     std::string what;        // "heating", "freezing"
     std::string state;       // "water(l)", "water(l) → water(cr)"
-    double T_start = 0.0;    // K
-    double T_end = 0.0;      // K
+    double T_start = 0.0;    // K; 0 where it has no meaning
+    double T_end = 0.0;      // K; likewise
     double p = 0.0;          // Pa; 0 where it has no meaning
     double heat = 0.0;       // J
     double entropy = 0.0;    // J/K

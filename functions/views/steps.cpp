@@ -6,16 +6,22 @@ namespace {
 
 constexpr std::size_t columns = 8;
 
+// A temperature or a pressure; 0 stands for one without meaning.
+void append_positive(MixedTable& table, double x)
+{
+    if (x > 0.0)
+        table.cells.emplace_back(x);
+    else
+        table.cells.emplace_back(std::string());
+}
+
 void append(MixedTable& table, const Step& step)
 {
     table.cells.emplace_back(step.what);
     table.cells.emplace_back(step.state);
-    table.cells.emplace_back(step.T_start);
-    table.cells.emplace_back(step.T_end);
-    if (step.p > 0.0)
-        table.cells.emplace_back(step.p);
-    else
-        table.cells.emplace_back(std::string());
+    append_positive(table, step.T_start);
+    append_positive(table, step.T_end);
+    append_positive(table, step.p);
     table.cells.emplace_back(step.heat);
     table.cells.emplace_back(step.entropy);
     table.cells.emplace_back(step.source);

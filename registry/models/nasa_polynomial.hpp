@@ -32,11 +32,12 @@ struct NasaInterval {
     double b2;     // integration constant of the entropy, dimensionless
 };
 
-// A phase by such polynomials. `intervals` points to static data or to data that outlives the phase.
+// A phase by such polynomials. Its pointers go to static data or to data that outlive the phase.
 struct NasaPolynomial {
     const NasaInterval* intervals;  // ascending, each beginning where the one before ends
-    std::size_t count;              // at least 1
-    double molar_mass;              // kg/mol
+    const double* bounds;           // the temperatures at which one gives way to the next: count - 1 of them
+    std::size_t count;              // intervals, at least 1
+    double specific_gas_constant;   // J/(kg K), R over the molar mass; 1 where the coefficients are in J/(kg K) themselves
     bool gas;                       // ideal gas, else condensed
     Range trust;                    // K
     Source const* origin;
@@ -54,15 +55,15 @@ struct NasaPolynomial {
                  + T * (a[3] + T * (a[4] / 2.0 + T * (a[5] / 3.0 + T * (a[6] / 4.0))));
         });
         if (!gas)
-            return specific_gas_constant() * at_standard_pressure;
-        return specific_gas_constant() * (at_standard_pressure - log(p / nasa_standard_pressure));
+            return specific_gas_constant * at_standard_pressure;
+        return specific_gas_constant * (at_standard_pressure - log(p / nasa_standard_pressure));
     }
 
     template <class Number>
     Number enthalpy(const Number& T, const Number&) const
     {
         using std::log;
-        return specific_gas_constant() * in_interval(T, [&](const NasaInterval& i) -> Number {
+        return specific_gas_constant * in_interval(T, [&](const NasaInterval& i) -> Number {
             const auto& a = i.a;
             return i.b1 - a[0] / T + a[1] * log(T)
                  + T * (a[2] + T * (a[3] / 2.0 + T * (a[4] / 3.0 + T * (a[5] / 4.0 + T * (a[6] / 5.0)))));
@@ -72,7 +73,7 @@ struct NasaPolynomial {
     template <class Number>
     Number heat_capacity(const Number& T, const Number&) const
     {
-        return specific_gas_constant() * in_interval(T, [&](const NasaInterval& i) -> Number {
+        return specific_gas_constant * in_interval(T, [&](const NasaInterval& i) -> Number {
             const auto& a = i.a;
             const Number inverse = 1.0 / T;
             return inverse * (a[1] + a[0] * inverse)
@@ -90,18 +91,11 @@ struct NasaPolynomial {
     const Source& source(double, double) const { return *origin; }
     std::span<const Source* const> sources() const { return {&origin, 1}; }
 
-    double specific_gas_constant() const { return nasa_gas_constant / molar_mass; } // J/(kg K)
-
 private:
     template <class Number, class Term>
     Number in_interval(const Number& T, Term&& term) const
     {
-        constexpr std::size_t most = 8; // intervals of a record; the source has at most five
-        double bounds[most];
-        const std::size_t inner = count - 1 < most ? count - 1 : most;
-        for (std::size_t i = 0; i < inner; ++i)
-            bounds[i] = intervals[i].upper;
-        return choose(T, std::span<const double>(bounds, inner),
+        return choose(T, std::span<const double>(bounds, count - 1),
                       [&](std::size_t index) -> Number { return term(intervals[index]); });
     }
 };
