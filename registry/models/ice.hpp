@@ -12,6 +12,8 @@
 namespace entropy_ledger::registry {
 
 struct IceIh {
+    using Bounds = IceBounds;
+
     static constexpr bool holds_heat_capacity = false; // the equation goes on smoothly
 
     template <class Number>
@@ -34,12 +36,11 @@ struct IceIh {
 
     Limits limits(double p) const
     {
-        namespace bounds = water_formulations::ice;
-        if (!(p > 0.0 && p <= bounds::greatest_pressure))
+        if (!(p > 0.0 && p <= Bounds::greatest_pressure))
             return {empty_range, empty_range};
-        const double melting = iapws_r14::melting_temperature(p) + bounds::melting_allowance;
-        return {{bounds::lowest_temperature, melting},
-                {bounds::lowest_temperature, melting + bounds::superheat_margin}};
+        const double melting = iapws_r14::melting_temperature(p) + Bounds::melting_allowance;
+        return {{Bounds::lowest_temperature, melting},
+                {Bounds::lowest_temperature, melting + Bounds::superheat_margin}};
     }
 
     const Source& source(double, double) const { return sources::iapws_r10; }

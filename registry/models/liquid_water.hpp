@@ -20,6 +20,8 @@
 namespace entropy_ledger::registry {
 
 struct LiquidWater {
+    using Bounds = LiquidWaterBounds;
+
     static constexpr bool holds_heat_capacity = false; // the model itself does so where that is right
 
     enum class Formulation { sr6_held, sr6, region1, region3 };
@@ -50,8 +52,8 @@ struct LiquidWater {
             using std::log;
             switch (f) {
             case Formulation::sr6_held: {
-                const Number edge(bounds::sr6_lower);
-                return iapws_sr6::entropy(edge, p) + iapws_sr6::heat_capacity(edge, p) * log(T / bounds::sr6_lower);
+                const Number edge(Bounds::sr6_lower);
+                return iapws_sr6::entropy(edge, p) + iapws_sr6::heat_capacity(edge, p) * log(T / Bounds::sr6_lower);
             }
             case Formulation::sr6: return iapws_sr6::entropy(T, p);
             case Formulation::region3: return region3(T, p).entropy();
@@ -67,8 +69,8 @@ struct LiquidWater {
         return select(T, p, [&](Formulation f) -> Number {
             switch (f) {
             case Formulation::sr6_held: {
-                const Number edge(bounds::sr6_lower);
-                return iapws_sr6::enthalpy(edge, p) + iapws_sr6::heat_capacity(edge, p) * (T - bounds::sr6_lower);
+                const Number edge(Bounds::sr6_lower);
+                return iapws_sr6::enthalpy(edge, p) + iapws_sr6::heat_capacity(edge, p) * (T - Bounds::sr6_lower);
             }
             case Formulation::sr6: return iapws_sr6::enthalpy(T, p);
             case Formulation::region3: return region3(T, p).enthalpy();
@@ -83,7 +85,7 @@ struct LiquidWater {
     {
         return select(T, p, [&](Formulation f) -> Number {
             switch (f) {
-            case Formulation::sr6_held: return iapws_sr6::heat_capacity(Number(bounds::sr6_lower), p);
+            case Formulation::sr6_held: return iapws_sr6::heat_capacity(Number(Bounds::sr6_lower), p);
             case Formulation::sr6: return iapws_sr6::heat_capacity(T, p);
             case Formulation::region3: return region3(T, p).heat_capacity();
             case Formulation::region1: break;
@@ -94,13 +96,14 @@ struct LiquidWater {
 
     Limits limits(double p) const
     {
-        if (!(p > 0.0 && p <= bounds::greatest_pressure))
+        if (!(p > 0.0 && p <= Bounds::greatest_pressure))
             return {empty_range, empty_range};
         const double saturation = stable_to(p);
-        const double lowest = p < bounds::sr6_pressure ? bounds::sr6_held_to : bounds::region1_trusted_to;
-        const double given = p <= bounds::sr6_stated_pressure ? bounds::sr6_lower : bounds::seam;
+        const double lowest = p < Bounds::sr6_pressure ? Bounds::sr6_held_to : Bounds::region1_trusted_to;
+        const double given = p <= Bounds::sr6_stated_pressure ? Bounds::sr6_lower : Bounds::seam;
         const double superheated =
-            std::min(bounds::region1_upper, std::max(bounds::superheat_trusted_to, saturation + bounds::superheat_margin));
+            std::min(Bounds::region1_upper,
+                     std::max(Bounds::superheat_trusted_to, saturation + Bounds::superheat_margin));
         const double two_phases = p < iapws_r7::critical_pressure
                                     ? saturation + iapws_r7::region3::metastable_margin(saturation)
                                     : saturation;
@@ -136,8 +139,8 @@ private:
     }
 
     // A bound belongs to the interval above it, but region 1 keeps its own upper end.
-    static constexpr double temperature_bounds[] = {bounds::sr6_lower, bounds::seam, bounds::region1_upper + 1e-9};
-    static constexpr double pressure_bounds[] = {bounds::sr6_pressure};
+    static constexpr double temperature_bounds[] = {Bounds::sr6_lower, Bounds::seam, Bounds::region1_upper + 1e-9};
+    static constexpr double pressure_bounds[] = {Bounds::sr6_pressure};
 
     static constexpr Formulation formulation_in(std::size_t temperature, std::size_t pressure)
     {

@@ -1,5 +1,5 @@
-// Steam, stable, supersaturated and supercritical, by R7-97: regions 2, 3 and 5 and the metastable-vapour equation; over
-// ice down to the sublimation curve of R14-08 and a little beyond. Ranges and seams: water_formulations.hpp.
+// Steam, stable, supersaturated and supercritical, by R7-97: regions 2, 3 and 5 and the metastable-vapour equation;
+// over ice down to the sublimation curve of R14-08 and a little beyond. Ranges and seams: water_formulations.hpp.
 #pragma once
 
 #include "registry/limits.hpp"
@@ -21,6 +21,8 @@
 namespace entropy_ledger::registry {
 
 struct Steam {
+    using Bounds = SteamBounds;
+
     static constexpr bool holds_heat_capacity = false;
 
     enum class Formulation { region2, metastable, region3, region5 };
@@ -93,9 +95,9 @@ struct Steam {
 
     Limits limits(double p) const
     {
-        if (!(p > 0.0 && p <= bounds::greatest_pressure))
+        if (!(p > 0.0 && p <= Bounds::greatest_pressure))
             return {empty_range, empty_range};
-        const double upper = p <= bounds::region5_pressure ? bounds::region5_upper : bounds::region2_upper;
+        const double upper = p <= Bounds::region5_pressure ? Bounds::region5_upper : Bounds::region2_upper;
         const Range lower = lower_ends(p);
         return {{lower.upper, upper}, {lower.lower, upper}};
     }
@@ -110,18 +112,18 @@ private:
     static Range lower_ends(double p)
     {
         if (p <= iapws_r7::triple_point_pressure) {
-            const double over_ice = std::max(bounds::over_ice_trusted_to, iapws_r14::sublimation_temperature(p) - bounds::sublimation_margin);
-            return {std::min(over_ice, bounds::lowest_temperature), bounds::lowest_temperature};
+            const double over_ice = iapws_r14::sublimation_temperature(p) - Bounds::sublimation_margin;
+            return {std::max(Bounds::over_ice_trusted_to, over_ice), Bounds::lowest_temperature};
         }
         if (p >= iapws_r7::critical_pressure)
-            return {bounds::region3_lower, bounds::region3_lower};
+            return {Bounds::region3_lower, Bounds::region3_lower};
         const double saturation = iapws_r7::saturation_temperature(p);
-        if (p <= bounds::metastable_pressure) {
-            const double end = std::max(bounds::lowest_temperature, saturation - 0.178 * (627.0 - saturation));
+        if (p <= Bounds::metastable_pressure) {
+            const double end = std::max(Bounds::lowest_temperature, saturation - 0.178 * (627.0 - saturation));
             return {end, end};
         }
-        if (saturation <= bounds::region3_lower)
-            return {saturation - bounds::supersaturation_margin, saturation};
+        if (saturation <= Bounds::region3_lower)
+            return {saturation - Bounds::supersaturation_margin, saturation};
         return {saturation - iapws_r7::region3::metastable_margin(saturation), saturation};
     }
 
@@ -132,8 +134,8 @@ private:
     }
 
     // A bound belongs to the interval above it; region 2 keeps its own upper end.
-    static constexpr double temperature_bounds[] = {bounds::metastable_upper, bounds::region3_lower, bounds::region3_upper,
-                                                    bounds::region2_upper + 1e-9};
+    static constexpr double temperature_bounds[] = {Bounds::metastable_upper, Bounds::region3_lower,
+                                                    Bounds::region3_upper, Bounds::region2_upper + 1e-9};
 
     template <class Number, class Branch>
     static Number select(const Number& T, const Number& p, Branch&& branch)
@@ -156,11 +158,12 @@ private:
     template <class Number, class Branch>
     static Number below_metastable_upper(const Number& T, const Number& p, Branch&& branch)
     {
-        static constexpr double pressures[] = {iapws_r7::triple_point_pressure, bounds::metastable_pressure * (1.0 + 1e-12)};
+        static constexpr double pressures[] = {iapws_r7::triple_point_pressure,
+                                               Bounds::metastable_pressure * (1.0 + 1e-12)};
         return choose(p, pressures, [&](std::size_t pressure) -> Number {
             if (pressure != 1)
                 return branch(Formulation::region2);
-            static constexpr double seam[] = {bounds::seam_supersaturation};
+            static constexpr double seam[] = {Bounds::seam_supersaturation};
             return choose(Number(p / iapws_r7::saturation_pressure(T)), seam, [&](std::size_t above) -> Number {
                 return branch(above ? Formulation::metastable : Formulation::region2);
             });

@@ -18,18 +18,21 @@
 // | g     | R7-97 region 3, vapour side  | 623.15 to 863.15             | 16.5 MPa to 100 MPa          |
 // | g     | R7-97 region 5               | 1073.15 to 2273.15           | to 50 MPa                    |
 //
-//          fit                                                   trust
-//   l      253.15 K (273.15 K above 0.3 MPa) to Ts; above pc     250.15 K (263.15 K from 1 MPa on) to 573.15 K or, where
-//          to boundary 2-3                                       that is more, Ts + 3 K, up to 623.15 K; beyond, to the
-//                                                                end of region 3's liquid branch
-//   cr     1 K to Tm + 0.0002 K                                  1 K to 5 K above that
-//   g      273.15 K, or the metastable equation's end, or Ts     to pt: Tsub - 3 K, not below 253.15 K; above 10 MPa 1 K
-//          above 10 MPa, to 1073.15 K or 2273.15 K               below Ts; beyond 623.15 K region 3's vapour branch
+// Lower and upper end of `fit`, and of `trust` where it goes further:
+//   l   fit    253.15 K (273.15 K above 0.3 MPa) to Ts, above pc to boundary 2-3
+//       trust  250.15 K (263.15 K from 1 MPa on) to 573.15 K or, where that is more, Ts + 3 K, at most 623.15 K;
+//              beyond, to the end of region 3's liquid branch
+//   cr  fit    1 K to Tm + 0.0002 K
+//       trust  5 K more
+//   g   fit    from 273.15 K to pt, then from the end of the metastable equation, above 10 MPa from Ts (623.15 K from
+//              pc on); to 2273.15 K, above 50 MPa to 1073.15 K
+//       trust  from Tsub - 3 K, but not below 253.15 K, to pt; above 10 MPa from Ts - 1 K, and where Ts is above
+//              623.15 K from the end of region 3's vapour branch
 //
 // Where phases meet. g of liquid and steam, R7-97 on both sides, within 11 J/kg or 4 mK of Ts. g of ice and liquid
-// within 0.16 mK of Tm below 70 MPa (0.02 mK below 0.9 MPa), 0.10 mK at 80 MPa, 0.85 mK at 100 MPa; at 0.101325 MPa at
-// 273.15253 K (R10-06: 273.152519 K). g of ice and steam 0.35 mK below Tsub at the triple point, 1.4 mK at 253.2 K.
-// The uncertainty that R14-08 states is greater: 2 % in Tm's pressure, 0.1 % or 9 mK in Tsub's.
+// within 0.02 mK of Tm to 0.3 MPa, 0.16 mK to 70 MPa, then 0.10 mK below it at 80 MPa, 0.85 mK at 100 MPa; at
+// 0.101325 MPa at 273.15253 K (R10-06: 273.152519 K). g of ice and steam 0.35 mK below Tsub at the triple point, 1.4 mK
+// at 253.2 K. Held by tests/published/water_melting.cpp.
 //
 // Steps in h (J/kg), s (J/(kg K)), cp (J/(kg K)) and g (J/kg) at the seams, on the way up in T or p:
 //   l, SR6-08 to region 1 at 273.15 K, pt to 0.3 MPa   -0.17        -0.0007            +0.12        +0.03
@@ -39,7 +42,7 @@
 //      region 1 to region 3 at 623.15 K                -7 to +28    -0.018 to +0.038
 //   g, metastable vapour to region 2, at Ts            -37 to +43   -0.08 to +0.08     -17 to +16   -23 to +16
 //      region 2 to region 3 along their boundary       -125 to +72  -0.18 to +0.10
-//      region 2 to region 5 at 1073.15 K               -94 to +90   -0.13 to +0.015    2.2
+//      region 2 to region 5 at 1073.15 K               -94 to +90   -0.13 to +0.015    -2.2 to +2.2
 // cp of the steam steps by +55 of 7147 at 10 MPa. Above pc there is one fluid: liquid and steam both are region 3.
 //
 // Liquid, the seam. From SR6-08 with its term in pressure to region 1 at other places it would be, in the same units:
@@ -78,42 +81,42 @@
 // s -0.094 J/(kg K), cp +0.4 %.
 #pragma once
 
-namespace entropy_ledger::registry::water_formulations {
+namespace entropy_ledger::registry {
 
-namespace liquid {
-inline constexpr double sr6_held_to = 250.15;          // K
-inline constexpr double sr6_lower = 253.15;            // K, SR6-08
-inline constexpr double seam = 273.15;                 // K, R7-97's lower end
-inline constexpr double region1_trusted_to = 263.15;   // K
-inline constexpr double region1_upper = 623.15;        // K, R7-97
-inline constexpr double superheat_trusted_to = 573.15; // K
-inline constexpr double superheat_margin = 3.0;        // K
-inline constexpr double sr6_stated_pressure = 0.3e6;   // Pa, SR6-08
-inline constexpr double sr6_pressure = 1.0e6;          // Pa, used below this
-inline constexpr double greatest_pressure = 100.0e6;   // Pa, R7-97
-} // namespace liquid
+struct LiquidWaterBounds {
+    static constexpr double sr6_held_to = 250.15;          // K
+    static constexpr double sr6_lower = 253.15;            // K, SR6-08
+    static constexpr double seam = 273.15;                 // K, R7-97's lower end
+    static constexpr double region1_trusted_to = 263.15;   // K
+    static constexpr double region1_upper = 623.15;        // K, R7-97
+    static constexpr double superheat_trusted_to = 573.15; // K
+    static constexpr double superheat_margin = 3.0;        // K
+    static constexpr double sr6_stated_pressure = 0.3e6;   // Pa, SR6-08
+    static constexpr double sr6_pressure = 1.0e6;          // Pa, used below this
+    static constexpr double greatest_pressure = 100.0e6;   // Pa, R7-97
+};
 
-namespace ice {
-inline constexpr double lowest_temperature = 1.0;      // K; R10-06 begins at 0 K, where T = 0 has no logarithm
-inline constexpr double greatest_pressure = 210.0e6;   // Pa, R10-06
-inline constexpr double melting_allowance = 2.0e-4;    // K, so that the equilibrium with the liquid lies inside `fit`
-inline constexpr double superheat_margin = 5.0;        // K
-} // namespace ice
+struct IceBounds {
+    static constexpr double lowest_temperature = 1.0;      // K; R10-06 begins at 0 K, where T = 0 has no logarithm
+    static constexpr double greatest_pressure = 210.0e6;   // Pa, R10-06
+    static constexpr double melting_allowance = 2.0e-4;    // K; the equilibrium with the liquid lies inside `fit`
+    static constexpr double superheat_margin = 5.0;        // K
+};
 
-namespace steam {
-inline constexpr double lowest_temperature = 273.15;    // K, R7-97
-inline constexpr double over_ice_trusted_to = 253.15;   // K
-inline constexpr double sublimation_margin = 3.0;       // K
-inline constexpr double metastable_pressure = 10.0e6;   // Pa, R7-97
-inline constexpr double metastable_upper = 584.15;      // K, just above saturation at that pressure
-inline constexpr double seam_supersaturation = 1.005;   // p over saturation pressure
-inline constexpr double supersaturation_margin = 1.0;   // K, above 10 MPa
-inline constexpr double region3_lower = 623.15;         // K, R7-97
-inline constexpr double region3_upper = 863.15;         // K, R7-97
-inline constexpr double region2_upper = 1073.15;        // K, R7-97
-inline constexpr double region5_upper = 2273.15;        // K, R7-97
-inline constexpr double region5_pressure = 50.0e6;      // Pa, R7-97
-inline constexpr double greatest_pressure = 100.0e6;    // Pa, R7-97
-} // namespace steam
+struct SteamBounds {
+    static constexpr double lowest_temperature = 273.15;    // K, R7-97
+    static constexpr double over_ice_trusted_to = 253.15;   // K
+    static constexpr double sublimation_margin = 3.0;       // K
+    static constexpr double metastable_pressure = 10.0e6;   // Pa, R7-97
+    static constexpr double metastable_upper = 584.15;      // K, just above saturation at that pressure
+    static constexpr double seam_supersaturation = 1.005;   // p over saturation pressure
+    static constexpr double supersaturation_margin = 1.0;   // K, above 10 MPa
+    static constexpr double region3_lower = 623.15;         // K, R7-97
+    static constexpr double region3_upper = 863.15;         // K, R7-97
+    static constexpr double region2_upper = 1073.15;        // K, R7-97
+    static constexpr double region5_upper = 2273.15;        // K, R7-97
+    static constexpr double region5_pressure = 50.0e6;      // Pa, R7-97
+    static constexpr double greatest_pressure = 100.0e6;    // Pa, R7-97
+};
 
-} // namespace entropy_ledger::registry::water_formulations
+} // namespace entropy_ledger::registry
