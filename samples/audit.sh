@@ -7,5 +7,5 @@ bash samples/install-needs.sh build sample
 if [ ! -f build/CMakeCache.txt ]; then
   cmake -S . -B build -G Ninja -DCMAKE_BUILD_TYPE=Release -DENTROPY_LEDGER_TESTS=OFF
 fi
-cmake --build build --target extension
+cmake --build build --target oxt
 /usr/bin/python3 -B samples/audit.py build/extension/unpacked samples/dairy-ledger.ods build/audit
