@@ -1,5 +1,7 @@
 #include "extension/argument_reading.hpp"
 
+#include <com/sun/star/sheet/XCellRangeData.hpp>
+
 #include <cppu/unotype.hxx>
 
 namespace entropy_ledger::extension {
@@ -19,10 +21,12 @@ Argument ArgumentReading::read(const Any& value, EmptyText empty_text)
             return {{}, &block_.emplace<NumberBlock>(*static_cast<const NumberBlock::Rows*>(value.getValue()))};
     }
     if (value.getValueTypeClass() == com::sun::star::uno::TypeClass_INTERFACE) {
-        // A macro may pass the cell range itself.
-        const Reference<XCellRange> range(value, com::sun::star::uno::UNO_QUERY);
-        if (range.is())
-            return read(range);
+        // A macro may pass the cell range itself; it keeps its shape.
+        const Reference<com::sun::star::sheet::XCellRangeData> range(value, com::sun::star::uno::UNO_QUERY);
+        if (range.is()) {
+            rows_ = range->getDataArray();
+            return {{}, &block_.emplace<AnyBlock>(rows_, buffer_, empty_text)};
+        }
     }
     return {read_cell(value, buffer_, empty_text), nullptr};
 }

@@ -26,6 +26,7 @@ public:
 
 private:
     TextBuffer buffer_;
+    AnyBlock::Rows rows_; // of a range that a macro passed
     std::variant<std::monostate, AnyBlock, NumberBlock, CellRangeBlock> block_;
 };
 

@@ -1,5 +1,6 @@
 #include "extension/cell_range_block.hpp"
 
+#include <com/sun/star/beans/XPropertySet.hpp>
 #include <com/sun/star/container/XIndexAccess.hpp>
 #include <com/sun/star/sheet/CellFlags.hpp>
 #include <com/sun/star/sheet/XCellRangeData.hpp>
@@ -20,9 +21,28 @@ using com::sun::star::uno::Sequence;
 using com::sun::star::uno::UNO_QUERY_THROW;
 using functions::Cell;
 
+namespace {
+
+// Whether a range goes over several sheets: $Sheet1.$A$1:$Sheet3.$B$2. Of such a range UNO hands out the first sheet
+// only, so its absolute name is asked.
+bool spans_sheets(const Reference<XCellRange>& range)
+{
+    const Reference<com::sun::star::beans::XPropertySet> properties(range, UNO_QUERY_THROW);
+    rtl::OUString name;
+    properties->getPropertyValue("AbsoluteName") >>= name;
+    const sal_Int32 colon = name.lastIndexOf(':');
+    return colon >= 0 && name.indexOf('.', colon) >= 0; // no sheet name holds a colon
+}
+
+} // namespace
+
 CellRangeBlock::CellRangeBlock(const Reference<XCellRange>& range)
 {
     namespace flags = com::sun::star::sheet::CellFlags;
+    if (spans_sheets(range)) {
+        cells_.push_back({Cell::Kind::error, functions::error_number(functions::ErrorCode::unusable_argument), 0});
+        return;
+    }
     const Reference<XCellRangesQuery> query(range, UNO_QUERY_THROW);
     const Reference<com::sun::star::container::XIndexAccess> areas(
         query->queryContentCells(static_cast<sal_Int16>(flags::VALUE | flags::DATETIME | flags::STRING

@@ -14,7 +14,10 @@
 #include "functions/processes/transfer.hpp"
 #include "functions/show_process.hpp"
 #include "functions/spread.hpp"
+#include "functions/table_arguments.hpp"
 #include "functions/views/views.hpp"
+
+#include <algorithm>
 
 namespace entropy_ledger::functions {
 
@@ -24,6 +27,21 @@ namespace {
 
 static_assert(std::size(entries) == function_count);
 
+bool is_single(const Argument& argument)
+{
+    return !argument.block || (argument.block->rows() == 1 && argument.block->columns() == 1);
+}
+
+Result call_with_cells(const Entry& entry, std::span<const Argument> arguments)
+{
+    if (!std::all_of(arguments.begin(), arguments.end(), is_single))
+        return spread(entry, arguments);
+    std::array<Cell, most_arguments> cells;
+    for (std::size_t i = 0; i < arguments.size(); ++i)
+        cells[i] = arguments[i].block ? arguments[i].block->at(0, 0) : arguments[i].cell;
+    return entry.handler(entry, std::span<const Cell>(cells.data(), arguments.size()));
+}
+
 // Missing arguments at the end, and in the middle, of what may not be missing are left to the reader, which names them.
 Result call_entry(const Entry& entry, std::span<const Argument> arguments)
 {
@@ -31,17 +49,11 @@ Result call_entry(const Entry& entry, std::span<const Argument> arguments)
         return entry.group(entry, arguments);
     if (arguments.size() > entry.arguments.size())
         return error_number(ErrorCode::unusable_argument);
-    std::array<Cell, most_arguments> cells;
-    for (std::size_t i = 0; i < arguments.size(); ++i) {
-        if (arguments[i].block) {
-            if (entry.result == ResultKind::table || arguments[i].block->rows() != 1
-                || arguments[i].block->columns() != 1)
-                return spread(entry, arguments);
-        }
+    if (std::any_of(arguments.begin(), arguments.end(), [](const Argument& a) { return a.block; })) {
+        const TableArguments read(entry, arguments);
+        return call_with_cells(entry, read.arguments());
     }
-    for (std::size_t i = 0; i < arguments.size(); ++i)
-        cells[i] = arguments[i].block ? arguments[i].block->at(0, 0) : arguments[i].cell;
-    return entry.handler(entry, std::span<const Cell>(cells.data(), arguments.size()));
+    return call_with_cells(entry, arguments);
 }
 
 } // namespace

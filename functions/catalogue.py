@@ -41,7 +41,7 @@ class Function:
 @dataclass(frozen=True)
 class Catalogue:
     functions: tuple[Function, ...]
-    argument_keys: tuple[str, ...]
+    argument_kinds: dict[str, str]  # by key
     views: dict
     processes: dict
 
@@ -52,8 +52,10 @@ def load(path: Path = Path(__file__).with_name("catalogue.toml")) -> Catalogue:
     def argument(spelled: str) -> Argument:
         key = spelled.rstrip("?.")
         entry = raw["arguments"][key]
-        return Argument(key, entry.get("shown", key), entry["kind"], entry["text"],
-                        spelled.endswith("?"), spelled.endswith("..."))
+        optional = spelled.endswith("?")
+        # Calc's wizard shows every argument of an add-in's free type as optional.
+        text = entry["text"] if optional else entry["text"] + " Required."
+        return Argument(key, entry.get("shown", key), entry["kind"], text, optional, spelled.endswith("..."))
 
     def with_reservoir(process: dict, need: str) -> list[str]:
         arguments = list(process["arguments"])
@@ -66,7 +68,7 @@ def load(path: Path = Path(__file__).with_name("catalogue.toml")) -> Catalogue:
     for view_name, view in raw["views"].items():
         for process_name, process in raw["processes"].items():
             if view["reservoir"] == "required" and "reservoir_after" not in process:
-                continue  # the process has its reservoirs inside: its entropy change is the generation
+                continue  # the process needs no other reservoir than its own
             functions.append(Function(
                 view_name, process_name, process_name, f"{view['text']}, {process['text']}.", view["result"],
                 tuple(argument(a) for a in with_reservoir(process, view["reservoir"]))))
@@ -86,4 +88,4 @@ def load(path: Path = Path(__file__).with_name("catalogue.toml")) -> Catalogue:
             optional = optional or a.optional
             if a.repeated and a is not f.arguments[-1]:
                 raise ValueError(f"catalogue: {f.name}: only the last argument can repeat")
-    return Catalogue(tuple(functions), tuple(raw["arguments"]), raw["views"], raw["processes"])
+    return Catalogue(tuple(functions), {key: entry["kind"] for key, entry in raw["arguments"].items()}, raw["views"], raw["processes"])

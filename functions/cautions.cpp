@@ -4,18 +4,15 @@
 namespace entropy_ledger::functions::cautions {
 
 const char* const undercooled_liquid
-    = "an undercooled liquid can freeze all at once and release its heat; follow the local code and a licensed engineer";
+    = "an undercooled liquid can freeze all at once and release its heat";
 const char* const superheated_liquid
-    = "a superheated liquid can flash to vapour violently; follow the local code and a licensed engineer";
+    = "a superheated liquid can flash to vapour violently";
 
 namespace {
 
-const char* const steam = "hot water and steam under pressure scald and burst vessels; follow the local pressure-equipment "
-                          "code and a licensed engineer";
-const char* const melt = "a hot melt burns, and meeting water or damp material it can explode; follow the local code and a "
-                         "licensed engineer";
-const char* const ammonia = "ammonia is toxic and burns eyes and lungs; follow the local refrigeration code and a licensed "
-                            "engineer";
+const char* const steam = "hot water and steam under pressure scald and burst vessels (pressure-equipment code)";
+const char* const melt = "a hot melt burns, and meeting water or damp material it can explode";
+const char* const ammonia = "ammonia is toxic and burns eyes and lungs (refrigeration code)";
 
 constexpr double scalding = 333.15;      // K, 60 °C
 constexpr double raised_pressure = 1.5e5; // Pa

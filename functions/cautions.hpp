@@ -1,5 +1,5 @@
 // Cautions for states in which work can hurt someone. They do not replace the local code, the plant's own rules or a
-// licensed engineer, and say so.
+// licensed engineer; Remarks says so after them.
 #pragma once
 
 #include "registry/substance.hpp"

@@ -42,7 +42,9 @@ inline constexpr std::size_t function_count = {len(catalogue.functions)};
 }} // namespace entropy_ledger::functions
 """)
 
-    keys = ",\n".join(f"    {k}" for k in catalogue.argument_keys)
+    takes_table = " || ".join(f"key == Key::{k}" for k, kind in catalogue.argument_kinds.items()
+                              if kind in ("state", "substance"))
+    keys = ",\n".join(f"    {k}" for k in catalogue.argument_kinds)
     write(out / "keys.hpp", f"""{head}#pragma once
 
 #include <cstddef>
@@ -55,7 +57,13 @@ enum class Key : std::uint8_t {{
 {keys}
 }};
 
-inline constexpr std::size_t key_count = {len(catalogue.argument_keys)};
+inline constexpr std::size_t key_count = {len(catalogue.argument_kinds)};
+
+// Whether a range may stand in the argument's place as the user's own property table.
+constexpr bool takes_table(Key key)
+{{
+    return {takes_table};
+}}
 
 }} // namespace entropy_ledger::functions
 """)

@@ -28,11 +28,12 @@ def table() -> str:
     lines += ["", "| process | what happens | with the view `ENTROPY.` or `HEAT.` | with the other views |", "|---|---|---|---|"]
     for name, process in catalogue.processes.items():
         by_view = {f.view: f for f in catalogue.functions if f.process == name}
-        other = by_view.get("GENERATION") or by_view["STEPS"]
-        lines.append(f"| `{name}` | {process['text']} | {signature(by_view['ENTROPY'])} | "
-                     f"{signature(other).replace(other.view + '.', '….')} |")
+        other = by_view.get("GENERATION")
+        others = signature(other).replace(other.view + ".", "….") if other else "the same; no `GENERATION.`"
+        lines.append(f"| `{name}` | {process['text']} | {signature(by_view['ENTROPY'])} | {others} |")
     lines += ["", "`T_reservoir` is required by `GENERATION.` and optional for `STEPS.`, `SOURCE.` and `CHECK.`. "
-              "RESERVOIR, TRANSFER and DISSIPATION hold their reservoirs: their `ENTROPY.` is the entropy generated.",
+              "TRANSFER, DISSIPATION and MIXING need no reservoir: their `ENTROPY.` is the entropy generated. `ENTROPY.RESERVOIR` is the "
+              "entropy change of the reservoir alone, and `HEAT.TRANSFER` is 0: what one reservoir gives the other takes.",
               "", "**Plain functions.**", "", "| function | result |", "|---|---|"]
     lines += [f"| {signature(f)} | {f.text} |" for f in catalogue.functions if not f.process]
     return "\n".join(lines) + "\n"

@@ -1,5 +1,6 @@
 #include "functions/reader.hpp"
 
+#include "functions/user_table.hpp"
 #include "functions/wording.hpp"
 
 #include <cmath>
@@ -65,6 +66,9 @@ Quantity Reader::quantity(Key key, std::string_view wanted)
         refuse(ErrorCode::unusable_argument, key, [&] { return std::string(std::get<Unreadable>(read).reason.text()); });
         return {};
     }
+    case Cell::Kind::table:
+        refuse(ErrorCode::unusable_argument, key, [] { return "is a range; a single cell is wanted"; });
+        return {};
     case Cell::Kind::missing:
     case Cell::Kind::empty:
         refuse(ErrorCode::unusable_argument, key,
@@ -192,8 +196,20 @@ std::string_view Reader::text(Key key)
     return {};
 }
 
+// The table in an argument; null when there is none or it is refused.
+const UserTable* Reader::table(Key key)
+{
+    const UserTable* found = cell(key).table;
+    if (!found || !found->refused())
+        return found;
+    keep(found->refusal().error, wants_words_ ? std::string(name(key)) + ": " + found->refusal().reason : std::string());
+    return nullptr;
+}
+
 const registry::Substance* Reader::substance(Key key)
 {
+    if (const UserTable* own = table(key))
+        return &own->substance();
     const std::string_view name = text(key);
     if (refused_)
         return nullptr;
@@ -206,6 +222,11 @@ const registry::Substance* Reader::substance(Key key)
 
 State Reader::state(Key key)
 {
+    if (const UserTable* own = table(key)) {
+        StateProblem none{false, false, {}};
+        const auto named = own->state().empty() ? std::nullopt : state_of(own->substance(), own->state(), none);
+        return named ? *named : State{&own->substance(), nullptr, registry::Aggregation::crystal, true};
+    }
     const std::string_view name = text(key);
     if (refused_)
         return {};
@@ -216,6 +237,16 @@ State Reader::state(Key key)
     refuse(problem.no_data ? ErrorCode::not_available : ErrorCode::unusable_argument, key,
            [&] { return problem.reason; });
     return {};
+}
+
+State Reader::state_beside_table(Key key, Key other)
+{
+    const Cell& c = cell(key);
+    if (c.kind == Cell::Kind::text && !normal_symbol(c.text).empty()) {
+        if (const UserTable* own = table(other))
+            return state(&own->substance(), key);
+    }
+    return state(key);
 }
 
 State Reader::state(const registry::Substance* substance, Key symbol)

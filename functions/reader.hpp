@@ -56,6 +56,8 @@ public:
 
     const registry::Substance* substance(Key key);
     State state(Key key);
+    // The same where a state symbol alone ("l") means the substance of the table in `other`.
+    State state_beside_table(Key key, Key other);
     State state(const registry::Substance* substance, Key symbol);
     Amount<double> amount(Key key, const registry::Substance* substance); // above 0
 
@@ -76,6 +78,7 @@ public:
 
 private:
     const Cell& cell(Key key) const;
+    const UserTable* table(Key key);
     std::string_view name(Key key) const;
     void keep(double error, std::string reason);
     Quantity quantity(Key key, std::string_view unit_wanted);

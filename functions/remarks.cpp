@@ -32,9 +32,17 @@ std::string Remarks::sources() const { return joined(sources_); }
 
 std::string Remarks::summary() const
 {
-    std::string text = reservations_.empty() && cautions_.empty() ? "ok" : "note: " + joined(reservations_);
+    std::string text;
+    const auto sentence = [&](const char* opening, const std::vector<std::string>& list) {
+        if (!list.empty())
+            text += (text.empty() ? "" : ". ") + std::string(opening) + joined(list);
+    };
+    sentence("CAUTION: ", cautions_);
     if (!cautions_.empty())
-        text = (reservations_.empty() ? "" : text + ". ") + "CAUTION: " + joined(cautions_);
+        text += "; follow the local code and a licensed engineer";
+    sentence("note: ", reservations_);
+    if (text.empty())
+        text = "ok";
     if (!notes_.empty())
         text += (text == "ok" ? ": " : ". ") + joined(notes_);
     return text;

@@ -22,7 +22,8 @@ public:
 
     // All sources, separated by "; ".
     std::string sources() const;
-    // "ok", or "ok: " with the notes; with reservations or cautions, those in their place.
+    // "ok", or "ok: " with the notes; with cautions or reservations those in its place, cautions first, under
+    // "CAUTION: " and "note: ". Cautions refer to the local code and a licensed engineer.
     std::string summary() const;
 
 private:

@@ -26,13 +26,14 @@ std::string_view trimmed(std::string_view text)
 
 char lower(char c) { return c >= 'A' && c <= 'Z' ? static_cast<char>(c - 'A' + 'a') : c; }
 
-// Words for whole states; common names of the phases of water, and of aggregation.
-constexpr std::array<std::pair<std::string_view, std::string_view>, 12> symbol_words{{
+// Words for states of aggregation.
+constexpr std::array<std::pair<std::string_view, std::string_view>, 13> symbol_words{{
     {"s", "cr"}, {"solid", "cr"}, {"crystal", "cr"}, {"ice", "cr"}, {"cr", "cr"},
     {"liquid", "l"}, {"l", "l"}, {"melt", "l"},
-    {"gas", "g"}, {"vapour", "g"}, {"vapor", "g"}, {"g", "g"},
+    {"gas", "g"}, {"vapour", "g"}, {"vapor", "g"}, {"steam", "g"}, {"g", "g"},
 }};
 
+// Words for whole states.
 constexpr std::array<std::pair<std::string_view, std::string_view>, 4> state_names{{
     {"ice", "water(cr)"}, {"steam", "water(g)"}, {"water vapour", "water(g)"}, {"water vapor", "water(g)"},
 }};
@@ -40,12 +41,6 @@ constexpr std::array<std::pair<std::string_view, std::string_view>, 4> state_nam
 constexpr std::array<std::pair<std::string_view, std::string_view>, 5> greek{{
     {"α", "alpha"}, {"β", "beta"}, {"γ", "gamma"}, {"δ", "delta"}, {"ε", "epsilon"},
 }};
-
-Aggregation aggregation_of(std::string_view symbol)
-{
-    return symbol.starts_with("cr") ? Aggregation::crystal : symbol.starts_with("l") ? Aggregation::liquid
-                                                                                     : Aggregation::gas;
-}
 
 // Whether a symbol of the registry ("cr,II") is `normal`, which has small letters only.
 bool same_symbol(std::string_view symbol, std::string_view normal)
@@ -103,6 +98,12 @@ std::string normal_symbol(std::string_view text)
     return {};
 }
 
+Aggregation aggregation_of_symbol(std::string_view symbol)
+{
+    return symbol.starts_with("cr") ? Aggregation::crystal : symbol.starts_with("l") ? Aggregation::liquid
+                                                                                     : Aggregation::gas;
+}
+
 SplitState split_state(std::string_view text)
 {
     text = trimmed(text);
@@ -128,6 +129,11 @@ SplitState split_state(std::string_view text)
     return {text, {}};
 }
 
+bool State::may_be(const Phase& candidate) const
+{
+    return phase ? phase == &candidate : any_aggregation || candidate.aggregation == aggregation;
+}
+
 const Phase& State::at(double T) const
 {
     if (phase)
@@ -135,7 +141,7 @@ const Phase& State::at(double T) const
     const auto& phases = substance->phases;
     std::size_t chosen = phases.size();
     for (std::size_t i = 0; i < phases.size(); ++i) {
-        if (phases[i].aggregation != aggregation)
+        if (!may_be(phases[i]))
             continue;
         if (chosen == phases.size()) {
             chosen = i;
@@ -213,7 +219,7 @@ std::optional<State> state_of(const Substance& substance, std::string_view symbo
             });
         return std::nullopt;
     }
-    State state{&substance, nullptr, aggregation_of(normal)};
+    State state{&substance, nullptr, aggregation_of_symbol(normal)};
     std::size_t candidates = 0;
     for (const Phase& phase : substance.phases) {
         if (same_symbol(phase.symbol, normal)) {

@@ -10,19 +10,26 @@
 namespace entropy_ledger::functions {
 
 // A state symbol in normal form: "cr", "l", "g", with a modification "cr,alpha". "s" is read as "cr", Greek letters by
-// their names, blanks and case ignored; the words solid, liquid, gas, vapour, steam, ice stand for their symbols.
+// their names, blanks and case ignored; the words solid, crystal, ice, liquid, melt, gas, vapour, steam stand for their symbols.
 // Empty when the text is no state symbol. Bounded: over 40 bytes is none.
 std::string normal_symbol(std::string_view text);
 
+// The state of aggregation of a symbol in normal form.
+registry::Aggregation aggregation_of_symbol(std::string_view symbol);
+
 // A substance in a state. A symbol without a modification ("cr") stands for all the modifications of that state of
-// aggregation; which of them is meant follows from the temperature.
+// aggregation; which of them is meant follows from the temperature. So it does for a user's table that names no state.
 struct State {
     const registry::Substance* substance = nullptr;
-    const registry::Phase* phase = nullptr;  // null: one of several modifications
+    const registry::Phase* phase = nullptr;  // null: one of several
     registry::Aggregation aggregation = registry::Aggregation::gas;
+    bool any_aggregation = false;
 
-    // The phase at temperature T: the one named, or the modification that is stable at T by the registry's
-    // transitions. Never null.
+    // Whether `candidate` is one of the phases that may be meant.
+    bool may_be(const registry::Phase& candidate) const;
+
+    // The phase at temperature T: the one named, or of those that may be meant the one that is stable at T by the
+    // registry's transitions.
     const registry::Phase& at(double T) const;
 };
 

@@ -25,6 +25,8 @@ inline double error_number(ErrorCode code)
     return std::bit_cast<double>(std::uint64_t{0x7ff8'0000'0000'0000} | static_cast<std::uint16_t>(code));
 }
 
+class UserTable;
+
 // One cell as an argument.
 struct Cell {
     enum class Kind : std::uint8_t {
@@ -32,11 +34,13 @@ struct Cell {
         empty,   // an empty cell of a range, or an empty text
         number,
         text,    // UTF-8
-        error    // `number` carries the code as error_number() does
+        error,   // `number` carries the code as error_number() does
+        table    // a whole range that is the user's own property table
     };
     Kind kind = Kind::missing;
     double number = 0.0;
     std::string_view text{}; // valid until the next access to the same block
+    const UserTable* table = nullptr; // of kind `table`
 };
 
 // A rectangular range of cells.

@@ -10,9 +10,11 @@ import sys
 from dataclasses import dataclass, field
 from decimal import Decimal, InvalidOperation
 
+import heat_capacity
 
 CODE_MODELS = {"liquid-water": "LiquidWater", "ice-ih": "IceIh", "steam": "Steam"}
-MODELS = {"nasa-polynomial", "constant-heat-capacity", *CODE_MODELS}
+OWN_REFERENCE = "heat-capacity-polynomial"  # its constants of integration are worked out here
+MODELS = {"nasa-polynomial", "constant-heat-capacity", OWN_REFERENCE, *CODE_MODELS}
 AMBIGUOUS = 0xFFFF   # as in compiled_tables.hpp
 LONGEST_NAME = 64    # bytes, as in compiled_tables.hpp
 
@@ -88,7 +90,21 @@ class Interval:
 class Phase(Block):
     symbol: str = ""
     aggregation: str = ""
-    intervals: list = field(default_factory=list)
+    intervals: list = field(default_factory=list)  # with a and b as stated
+    pieces: list = field(default_factory=list)     # heat_capacity.Piece: with b worked out
+
+    @property
+    def tables(self):
+        return self.pieces or self.intervals
+
+
+@dataclass
+class Transition:
+    line: Line
+    below: str
+    above: str
+    temperature: str
+    enthalpy: str = None  # J/kg
 
 
 @dataclass
@@ -96,7 +112,7 @@ class Substance(Block):
     name: str = ""
     aliases: list = field(default_factory=list)  # (line, name)
     phases: list = field(default_factory=list)
-    transitions: list = field(default_factory=list)  # (line, from, to, temperature)
+    transitions: list = field(default_factory=list)  # Transition
 
 
 class Data:
@@ -143,11 +159,7 @@ def read_file(path, data):
         elif line.keyword == "phase":
             phase = new_phase(block, line)
         elif line.keyword == "transition":
-            parts = line.rest.split()
-            if len(parts) != 3:
-                line.fail("transition: two state symbols and a temperature are wanted")
-            line.number_of(parts[2])
-            block.transitions.append((line, *parts))
+            block.transitions.append(new_transition(line))
         elif phase is not None:
             read_phase(phase, line)
         else:
@@ -198,6 +210,16 @@ def new_phase(substance, line):
     return substance.phases[-1]
 
 
+def new_transition(line):
+    parts = line.rest.split()
+    if len(parts) != 3 and (len(parts) != 5 or parts[3] != "enthalpy"):
+        line.fail("transition: two state symbols, a temperature, and perhaps enthalpy with a number are wanted")
+    line.number_of(parts[2])
+    if len(parts) == 5 and line.number_of(parts[4]) <= 0:
+        line.fail("transition: the enthalpy is not above zero")
+    return Transition(line, *parts[:3], *parts[4:])
+
+
 def read_phase(phase, line):
     keyword = line.keyword
     if keyword == "model":
@@ -210,8 +232,18 @@ def read_phase(phase, line):
         if not phase.intervals or getattr(phase.intervals[-1], keyword) is not None:
             line.fail(f"{keyword}: no interval before it, or a second one")
         setattr(phase.intervals[-1], keyword, line.numbers(7 if keyword == "a" else 2))
+    elif keyword == "trust" and " in " in line.rest:
+        values, zero = heat_capacity.with_scale(line)
+        line.rest = " ".join(str(value + zero) for value in values)
+        phase.set(line, line.range())
     elif keyword in ("trust", "fit"):
         phase.set(line, line.range())
+    elif keyword == "heat-capacity" and " in " in line.rest:
+        heat_capacity.read_polynomial(phase.pieces, line)
+    elif keyword == "heat-capacity-table":
+        heat_capacity.read_table(phase.pieces, line)
+    elif keyword == "inverse":
+        heat_capacity.read_inverse(phase.pieces, line)
     elif keyword == "heat-capacity":
         phase.set(line, line.numbers(1)[0])
     elif keyword == "reference":
@@ -233,7 +265,7 @@ def read_names(path, data):
 def check_phase(data, substance, phase):
     phase.need("model", "uncertainty")
     model, line = phase.values["model"], phase.line
-    statements = {"nasa-polynomial": {"trust"},
+    statements = {"nasa-polynomial": {"trust"}, OWN_REFERENCE: {"trust"},
                   "constant-heat-capacity": {"heat-capacity", "reference", "fit", "trust"}}.get(model, set())
     phase.need(*sorted(statements))
     extra = {"trust", "fit", "heat-capacity", "reference"} & set(phase.values) - statements
@@ -245,7 +277,12 @@ def check_phase(data, substance, phase):
         check_intervals(phase)
         if "molar-mass" not in substance.values:
             substance.line.fail("molar-mass is missing")
-        phase.values["fit"] = phase.intervals[0].bounds[0], phase.intervals[-1].bounds[1]
+    if (model == OWN_REFERENCE) != bool(phase.pieces):
+        line.fail(f"model {model} {'without' if not phase.pieces else 'with'} a range of heat capacity")
+    if phase.pieces and phase.aggregation == "gas":
+        line.fail(f"model {model} is for condensed phases only")
+    if phase.tables:
+        phase.values["fit"] = phase.tables[0].bounds[0], phase.tables[-1].bounds[1]
     if statements:
         (lower, upper), (least, most) = phase.values["fit"], phase.values["trust"]
         if not (Decimal(least) <= Decimal(lower) and Decimal(upper) <= Decimal(most)):
@@ -285,6 +322,7 @@ def check(data):
         for phase in substance.phases:
             check_phase(data, substance, phase)
         check_transitions(substance)
+        link_phases(substance)
     for line, name, names in data.names:
         if name not in data.substances:
             line.fail(f"unknown substance '{name}'")
@@ -295,15 +333,43 @@ def check(data):
 def check_transitions(substance):
     symbols = [p.symbol for p in substance.phases]
     last = Decimal(0)
-    for line, below, above, temperature in substance.transitions:
-        if below not in symbols or above not in symbols:
+    for transition in substance.transitions:
+        line = transition.line
+        if transition.below not in symbols or transition.above not in symbols:
             line.fail("transition of a phase that the substance does not have")
-        upper = symbols.index(above)
-        if upper != symbols.index(below) + 1 or substance.phases[upper].aggregation == "gas":
+        upper = symbols.index(transition.above)
+        if upper != symbols.index(transition.below) + 1 or substance.phases[upper].aggregation == "gas":
             line.fail("transition of phases that are no neighbouring condensed ones")
-        if Decimal(temperature) <= last:
+        if Decimal(transition.temperature) <= last:
             line.fail("transitions do not ascend in temperature")
-        last = Decimal(temperature)
+        last = Decimal(transition.temperature)
+
+
+def link_phases(substance):
+    """The constants of integration of a substance whose phases state heat capacities alone."""
+    phases = substance.phases
+    if not any(phase.pieces for phase in phases):
+        for transition in substance.transitions:
+            if transition.enthalpy is not None:
+                transition.line.fail(f"enthalpy: only between phases of model {OWN_REFERENCE}; others bring their own")
+        return
+    for phase in phases:
+        if not phase.pieces:
+            phase.line.fail(f"a phase of another model beside one of {OWN_REFERENCE}: they share no reference")
+    changes = []
+    for below, above in zip(phases, phases[1:]):
+        found = [t for t in substance.transitions if (t.below, t.above) == (below.symbol, above.symbol)]
+        if not found:
+            above.line.fail(f"no transition from {below.symbol} to {above.symbol}: the phases share no reference")
+        transition = found[0]
+        if transition.enthalpy is None:
+            transition.line.fail("transition: the enthalpy is missing")
+        for phase in (below, above):
+            least, most = map(Decimal, phase.values["trust"])
+            if not least <= Decimal(transition.temperature) <= most:
+                transition.line.fail(f"transition: not within the trust of {phase.symbol}")
+        changes.append((Decimal(transition.temperature), Decimal(transition.enthalpy)))
+    heat_capacity.link_phases([phase.pieces for phase in phases], changes)
 
 
 def folded(name):
@@ -371,8 +437,8 @@ def quoted(text):
 
 
 def floating(text):
-    """A C++ literal of double with the same digits."""
-    text = str(text)
+    """A C++ literal of double with the same digits; of a number that was worked out, the nearest double."""
+    text = repr(float(text)) if isinstance(text, Decimal) and len(text.as_tuple().digits) > 20 else str(text)
     return text if any(c in text for c in ".eE") else text + ".0"
 
 
@@ -382,10 +448,11 @@ def model_text(data, substance, phase, first_interval, first_bound):
         return f"{CODE_MODELS[model]}{{}}"
     trust = ", ".join(map(floating, phase.values["trust"]))
     source = data.sources[phase.values["source"]].cpp
-    if model == "nasa-polynomial":
+    if phase.tables:
         gas = "true" if phase.aggregation == "gas" else "false"
-        return (f"NasaPolynomial{{intervals + {first_interval}, bounds + {first_bound}, {len(phase.intervals)}, "
-                f"nasa_gas_constant / {floating(substance.values['molar-mass'])}, {gas}, {{{trust}}}, &{source}}}")
+        constant = "1.0" if phase.pieces else f"nasa_gas_constant / {floating(substance.values['molar-mass'])}"
+        return (f"NasaPolynomial{{intervals + {first_interval}, bounds + {first_bound}, {len(phase.tables)}, "
+                f"{constant}, {gas}, {{{trust}}}, &{source}}}")
     fit = ", ".join(map(floating, phase.values["fit"]))
     reference = ", ".join(map(floating, phase.values["reference"]))
     return (f"ConstantHeatCapacity{{{floating(phase.values['heat-capacity'])}, {reference}, {{{fit}}}, {{{trust}}}, "
@@ -427,15 +494,15 @@ def emit(data):
         first_phase, first_transition = len(phases), len(transitions)
         for phase in substance.phases:
             model = model_text(data, substance, phase, len(intervals), len(bounds))
-            bounds += [floating(interval.bounds[1]) + "," for interval in phase.intervals[:-1]]
-            for interval in phase.intervals:
+            bounds += [floating(interval.bounds[1]) + "," for interval in phase.tables[:-1]]
+            for interval in phase.tables:
                 ends, a, b = (", ".join(map(floating, x)) for x in (interval.bounds, interval.a, interval.b))
                 intervals.append(f"{{{ends}, {{{a}}}, {b}}},")
             phases.append(f"{{{quoted(phase.symbol)}, Aggregation::{phase.aggregation}, {model}, "
                           f"{uncertainty_text(data, phase)}, {quoted(phase.values.get('remark', ''))}}},")
         symbols = [p.symbol for p in substance.phases]
-        for _, below, above, temperature in substance.transitions:
-            transitions.append(f"{{{symbols.index(below)}, {symbols.index(above)}, {floating(temperature)}}},")
+        for t in substance.transitions:
+            transitions.append(f"{{{symbols.index(t.below)}, {symbols.index(t.above)}, {floating(t.temperature)}}},")
         spans = f"{{phases + {first_phase}, {len(substance.phases)}}}, "
         count = len(substance.transitions)
         spans += f"{{transitions + {first_transition}, {count}}}" if count else "{}"

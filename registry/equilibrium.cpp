@@ -13,6 +13,12 @@ namespace {
 // Below this entropy of transition relative to the entropy itself, the Gibbs curves touch rather than cross.
 constexpr double touching = 1e-6;
 
+bool touch(const Phase& first, const Phase& second, double T, double p)
+{
+    const double s = entropy(first, T, p);
+    return !(std::abs(entropy(second, T, p) - s) >= touching * std::abs(s));
+}
+
 std::optional<double> nominal_temperature(const Substance& substance, const Phase& first, const Phase& second)
 {
     for (const Transition& t : substance.transitions) {
@@ -61,8 +67,7 @@ std::optional<double> equilibrium_temperature(const Substance& substance, const 
     // Near the temperature at which the source lets the two meet.
     const auto nominal = nominal_temperature(substance, first, second);
     if (nominal && common.contains(*nominal)) {
-        const double step = entropy(second, *nominal, p) - entropy(first, *nominal, p);
-        if (std::abs(step) < touching * std::abs(entropy(first, *nominal, p)))
+        if (touch(first, second, *nominal, p))
             return *nominal;
         for (double width = 1e-3; width <= 64.0; width *= 4.0) {
             const double lower = std::max(common.lower, *nominal - width);
@@ -82,8 +87,12 @@ std::optional<double> equilibrium_temperature(const Substance& substance, const 
     for (int i = 1; i <= cells; ++i) {
         const double upper = i == cells ? common.upper : common.lower * std::pow(ratio, i);
         const double at_upper = difference(upper);
-        if (at_lower * at_upper <= 0.0)
-            return root(difference, lower, upper, at_lower, at_upper);
+        if (at_lower * at_upper <= 0.0) {
+            // Above the critical pressure liquid and gas are one fluid: equal curves are no equilibrium of two phases.
+            const double T = root(difference, lower, upper, at_lower, at_upper);
+            if (!touch(first, second, T, p))
+                return T;
+        }
         lower = upper;
         at_lower = at_upper;
     }

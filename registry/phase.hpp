@@ -58,6 +58,9 @@ Limits limits_of(const Phase& phase, double p);
 // The source that answers at (T, p).
 const Source& source_of(const Phase& phase, double T, double p);
 
+// Whether the phase is an ideal gas at every pressure.
+bool is_ideal_gas(const Phase& phase);
+
 // Whether entropy depends on pressure in the phase's model.
 bool depends_on_pressure(const Phase& phase);
 

@@ -71,12 +71,22 @@ inline const Source& source_of(const Phase& phase, double T, double p)
     return std::visit([&](const auto& model) -> const Source& { return model.source(T, p); }, phase.model);
 }
 
+inline bool is_ideal_gas(const Phase& phase)
+{
+    const auto* polynomial = std::get_if<NasaPolynomial>(&phase.model);
+    return polynomial && polynomial->gas;
+}
+
 inline bool depends_on_pressure(const Phase& phase)
 {
-    if (std::holds_alternative<ConstantHeatCapacity>(phase.model))
-        return false;
-    const auto* polynomial = std::get_if<NasaPolynomial>(&phase.model);
-    return !polynomial || polynomial->gas;
+    return std::visit(
+        [](const auto& model) {
+            if constexpr (requires { model.gas; })
+                return model.gas;
+            else
+                return !model.holds_heat_capacity;
+        },
+        phase.model);
 }
 
 inline std::span<const Source* const> sources_of(const Phase& phase)

@@ -78,6 +78,23 @@ bool begins_with(std::string_view name, std::string_view beginning)
 
 } // namespace
 
+// Symbols of the elements (IUPAC Periodic Table of the Elements, 2022) of two letters whose spelling in capitals is a
+// formula or could become one.
+bool is_element_symbol(std::string_view name)
+{
+    constexpr std::string_view symbols =
+        "He Li Be Ne Na Mg Al Si Cl Ar Ca Sc Ti Cr Mn Fe Co Ni Cu Zn Ga Ge As Se Br Kr Rb Sr Zr Nb Mo Tc Ru Rh Pd Ag Cd In "
+        "Sn Sb Te Xe Cs Ba La Ce Pr Nd Pm Sm Eu Gd Tb Dy Ho Er Tm Yb Lu Hf Ta Re Os Ir Pt Au Hg Tl Pb Bi Po At Rn Fr Ra "
+        "Ac Th Pa Np Pu Am Cm Bk Cf Es Fm Md No Lr Rf Db Sg Bh Hs Mt Ds Rg Cn Nh Fl Mc Lv Ts Og ";
+    if (name.size() != 2)
+        return false;
+    for (std::size_t i = 0; i < symbols.size(); i += 3) {
+        if (symbols.substr(i, 2) == name)
+            return true;
+    }
+    return false;
+}
+
 std::span<const Substance> substances() { return compiled::substances; }
 
 Found find_substance(std::string_view name)
@@ -87,6 +104,8 @@ Found find_substance(std::string_view name)
         return {nullptr, false};
     if (const NameEntry* entry = find_in(compiled::names_as_written, name))
         return found(*entry);
+    if (is_element_symbol(name))
+        return {nullptr, false}; // Hf is hafnium, not HF with small letters
     std::array<char, longest_name> folded;
     std::transform(name.begin(), name.end(), folded.begin(), lower);
     if (const NameEntry* entry = find_in(compiled::names_without_case, {folded.data(), name.size()}))

@@ -52,10 +52,12 @@ PROPOSALS = [
     Duty("Warmer coil", "Freeze undercooled water on a coil of -4 °C", "phase", 3950, -3, None, -4, "water", "l → cr"),
 ]
 
+# Before the verdict, the duty whose verdict and generation are shown, and after them.
 FINDINGS = [
-    "Free cooling cannot occur as specified: at 0 °C water would have to give heat to air of +3 °C; the generation is negative.",
-    "A warmer coil can occur and destroys less work by night than today's coil of -9 °C.",
-    "Undercooled water freezes away from equilibrium: it generates entropy even where the coil is as warm as the water.",
+    ("Free cooling ", "Free cooling", "Water at 0 °C gives heat only to what is colder."),
+    ("A warmer coil ", "Warmer coil", "It destroys less work by night than today's coil."),
+    ("Undercooled water on the coil ", "Ice bank, by night",
+     "Freezing away from equilibrium generates entropy even where the coil is as warm as the water."),
 ]
 
 CAUTIONS = [

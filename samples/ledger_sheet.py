@@ -65,13 +65,14 @@ def row_formulas(duty: dairy.Duty, r: int) -> dict[str, str]:
         call = f"{process}({arguments};{around}{rest})"
     elif duty.process == "transfer":
         cells["K"] = f"={amount}"
-        cells["L"] = f"=ENTROPY.RESERVOIR(-{amount}*1000000;{start})/1000"
-        cells["M"] = f"=ENTROPY.RESERVOIR({amount}*1000000;{end})/1000"
+        # The system is the one that takes the heat up.
+        cells["L"] = f"=ENTROPY.RESERVOIR({amount}*1000000;{end})/1000"
+        cells["M"] = f"=ENTROPY.RESERVOIR(-{amount}*1000000;{start})/1000"
         call = f"TRANSFER({amount}*1000000;{start};{end})"
         cells["N"] = f"=ENTROPY.{call}/1000"
     else:
         cells["K"] = f"={amount}"
-        cells["M"] = f"=ENTROPY.RESERVOIR({amount}*1000000;{start})/1000"
+        cells["L"] = f"=ENTROPY.RESERVOIR({amount}*1000000;{start})/1000"
         call = f"DISSIPATION({amount}*1000000;{start})"
         cells["N"] = f"=ENTROPY.{call}/1000"
     return cells | {"call": call}
@@ -168,7 +169,8 @@ class LedgerSheet:
             self.put(sheet, f"B{r}", label, "LedgerWords")
             sheet.getCellRangeByName(f"C{r}").CellStyle = "LedgerWords"
             self.put(sheet, f"D{r}", figure, "LedgerInput", code)
-            self.put(sheet, f"E{r}", origin, "LedgerNote").IsTextWrapped = False
+            note = self.put(sheet, f"E{r}", origin, "LedgerNote")
+            note.IsTextWrapped, note.HoriJustify, note.ParaIndent = False, LEFT, 200
         self.put(sheet, "B7", "Shaded cells are inputs; change one and the ledger follows.", "LedgerNote").IsTextWrapped = False
         self.name("Ambient", "D5")
         self.name("MilkHeatCapacity", "D6")
@@ -187,7 +189,8 @@ class LedgerSheet:
         self.put(sheet, f"B{r}", "Total of the duties")
         self.put(sheet, f"N{r}", f"=ENTROPY.TOTAL(N{FIRST_ROW}:N{last})", code="#,##0.000")
         self.put(sheet, f"O{r}", f"=WORK.LOST(N{r}*1000;{kelvin('Ambient')})/3600000", code="#,##0.00")
-        self.put(sheet, f"P{r}", f"=ENTROPY.VERDICT(N{r}*1000)")
+        # A total of many duties has no verdict of its own: one that cannot occur must not hide in it.
+        self.put(sheet, f"P{r}", f'=COUNTIF(P{FIRST_ROW}:P{last};"cannot occur")&" cannot occur"')
         sheet.getCellRangeByName(f"A{r}:{LAST}{r}").CellStyle = "LedgerTotal"
         sheet.getCellRangeByName(f"N{r}").NumberFormat = self.number_format("#,##0.000")
         sheet.getCellRangeByName(f"O{r}").NumberFormat = self.number_format("#,##0.00")
@@ -203,8 +206,11 @@ class LedgerSheet:
             self.make_row(number, duty, r)
             r += 1
         r += 1
-        for finding in dairy.FINDINGS:
-            self.merged_text(sheet, f"B{r}:{LAST}{r}", finding, "LedgerNote", 480)
+        row_of = {duty.item: row for _, duty, row, _ in self.rows}
+        for before, item, after in dairy.FINDINGS:
+            self.merged_text(sheet, f"B{r}:{LAST}{r}", "", "LedgerNote", 480)
+            n = row_of[item]
+            self.put(sheet, f"B{r}", f'="{before}"&P{n}&" as specified: "&TEXT(N{n};"0.0")&" kJ/K generated. {after}"')
             r += 1
         for caution in dairy.CAUTIONS:
             self.merged_text(sheet, f"B{r}:{LAST}{r}", caution, "LedgerCaution", 480)
@@ -261,6 +267,7 @@ class LedgerSheet:
         chart.HasLegend = False
         diagram.HasYAxisTitle = True
         diagram.YAxisTitle.String = "Lost work in a day, kWh"
+        diagram.YAxis.LinkNumberFormatToSource = False
         diagram.YAxis.NumberFormat = self.chart_number_format(chart, "#,##0")
         diagram.XAxis.ReverseDirection = True
         diagram.YAxis.CrossoverPosition = END  # the scale at the foot, with the first item on top
@@ -319,6 +326,7 @@ class LedgerSheet:
         footer = page.RightPageFooterContent
         footer.LeftText.String = dairy.TITLE + " · invented"
         footer.CenterText.String = ""
+        footer.RightText.String = ""
         page.RightPageFooterContent = footer
         sheet.PageStyle = "Default"
 

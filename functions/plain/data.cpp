@@ -33,7 +33,7 @@ registry::Limits range_of(const State& state)
         return registry::limits_of(*state.phase, standard_pressure);
     registry::Limits all{registry::empty_range, registry::empty_range};
     for (const registry::Phase& phase : state.substance->phases) {
-        if (phase.aggregation != state.aggregation)
+        if (!state.may_be(phase))
             continue;
         const registry::Limits own = registry::limits_of(phase, standard_pressure);
         const auto join = [](registry::Range& range, const registry::Range& more) {
@@ -97,7 +97,7 @@ Result data_source(const Entry& entry, std::span<const Cell> cells)
         return reader.refusal().error;
     std::string text;
     for (const registry::Phase& phase : state.substance->phases) {
-        if (state.phase ? state.phase != &phase : state.aggregation != phase.aggregation)
+        if (!state.may_be(phase))
             continue;
         for (const registry::Source* source : registry::sources_of(phase)) {
             if (text.find(source->citation) == std::string::npos)

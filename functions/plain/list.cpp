@@ -2,6 +2,7 @@
 #include "functions/reader.hpp"
 
 #include <algorithm>
+#include <optional>
 #include <string>
 
 namespace entropy_ledger::functions::plain {
@@ -21,6 +22,14 @@ bool holds(std::string_view text, std::string_view part)
     return std::search(text.begin(), text.end(), part.begin(), part.end(), same) != text.end();
 }
 
+// Whether a phase is in the state of a symbol in normal form; "cr" fits every modification.
+bool is_of_state(const registry::Phase& phase, const std::string& symbol)
+{
+    if (symbol.find(',') == std::string::npos)
+        return phase.aggregation == aggregation_of_symbol(symbol);
+    return phase.symbol.size() == symbol.size() && holds(phase.symbol, symbol);
+}
+
 const char* shown_origin(registry::Origin origin)
 {
     switch (origin) {
@@ -37,6 +46,13 @@ Result data_list(const Entry& entry, std::span<const Cell> cells)
 {
     Reader reader(entry, cells, false);
     const std::string_view filter = reader.given(Key::filter) ? reader.text(Key::filter) : std::string_view();
+    const std::string_view symbol_text = reader.given(Key::symbol) ? reader.text(Key::symbol) : std::string_view();
+    const std::string symbol = normal_symbol(symbol_text);
+    if (!symbol_text.empty() && symbol.empty())
+        reader.refuse(ErrorCode::unusable_argument, Key::symbol, [] { return "is no state symbol"; });
+    std::optional<double> T_within;
+    if (reader.given(Key::T_within))
+        T_within = reader.temperature(Key::T_within);
     if (reader.refused())
         return reader.refusal().error;
 
@@ -50,7 +66,11 @@ Result data_list(const Entry& entry, std::span<const Cell> cells)
             const std::string state = shown_state(substance, phase);
             if (!holds(state, filter) && !holds(substance.title, filter) && !holds(substance.formula, filter))
                 continue;
+            if (!symbol.empty() && !is_of_state(phase, symbol))
+                continue;
             const registry::Limits limits = registry::limits_of(phase, standard_pressure);
+            if (T_within && !limits.trust.contains(*T_within))
+                continue;
             table.cells.emplace_back(state);
             table.cells.emplace_back(std::string(substance.title));
             table.cells.emplace_back(std::string(substance.formula));

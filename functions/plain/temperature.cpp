@@ -13,10 +13,10 @@ namespace {
 std::optional<double> balance(const registry::Substance& substance, const State& first, const State& second, double p)
 {
     for (const registry::Phase& a : substance.phases) {
-        if (first.phase ? first.phase != &a : first.aggregation != a.aggregation)
+        if (!first.may_be(a))
             continue;
         for (const registry::Phase& b : substance.phases) {
-            if (second.phase ? second.phase != &b : second.aggregation != b.aggregation)
+            if (!second.may_be(b))
                 continue;
             const auto T = registry::equilibrium_temperature(substance, a, b, p);
             // A hair to both sides: at the temperature itself either neighbour may be the stable one.

@@ -23,23 +23,25 @@ public:
     {
         using std::log;
         const Number change = capacity_.value * log(T_end_ / T_start_);
-        return {change, std::abs(registry::value_of(change))};
+        return {change, std::abs(value_of(change))};
     }
 
     Term<Number> heat() const
     {
         const Number change = capacity_.value * (T_end_ - T_start_);
-        return {change, registry::value_of(capacity_.value) * registry::value_of(T_end_ + T_start_)};
+        return {change, value_of(capacity_.value) * value_of(T_end_ + T_start_)};
     }
 
     bool rate() const { return capacity_.rate; }
 
+    TemperatureSpan span() const { return {value_of(T_start_), value_of(T_end_)}; }
+
     void steps(const StepVisitor& visit) const
     {
-        const double from = registry::value_of(T_start_);
-        const double to = registry::value_of(T_end_);
-        visit({to < from ? "cooling" : "heating", "body", from, to, 0.0, registry::value_of(heat().value),
-               registry::value_of(entropy().value), "given in the sheet"});
+        const double from = value_of(T_start_);
+        const double to = value_of(T_end_);
+        visit({to < from ? "cooling" : "heating", "body", from, to, 0.0, value_of(heat().value),
+               value_of(entropy().value), "given in the sheet"});
     }
 
     void remarks(Remarks& remarks) const { remarks.source("heat capacity given in the sheet, taken as constant"); }

@@ -16,9 +16,9 @@ public:
         Dissipation process;
         process.work_ = reader.heat(Key::work);
         process.T_ = reader.reservoir_temperature(Key::T);
-        if (!reader.refused() && registry::value_of(process.work_.value) < 0.0)
+        if (!reader.refused() && value_of(process.work_.value) < 0.0)
             reader.refuse(ErrorCode::unusable_argument, Key::work, [&] {
-                return "is " + shown(registry::value_of(process.work_.value))
+                return "is " + shown(value_of(process.work_.value))
                      + " J; work that is turned to heat is not negative: heat at one temperature does not turn "
                        "wholly to work";
             });
@@ -28,21 +28,26 @@ public:
     Term<Number> entropy() const
     {
         const Number change = work_.value / T_;
-        return {change, std::abs(registry::value_of(change))};
+        return {change, std::abs(value_of(change))};
     }
 
-    Term<Number> heat() const { return {work_.value, std::abs(registry::value_of(work_.value))}; }
+    Term<Number> heat() const { return {work_.value, std::abs(value_of(work_.value))}; }
 
     bool rate() const { return work_.rate; }
 
     void steps(const StepVisitor& visit) const
     {
-        const double T = registry::value_of(T_);
-        visit({"work turned to heat", "reservoir", T, T, 0.0, registry::value_of(work_.value),
-               registry::value_of(entropy().value), {}});
+        const double T = value_of(T_);
+        visit({"work turned to heat", "reservoir", T, T, 0.0, value_of(work_.value),
+               value_of(entropy().value), {}});
     }
 
-    void remarks(Remarks& remarks) const { remarks.source("work given in the sheet"); }
+    void remarks(Remarks& remarks) const
+    {
+        remarks.source("work given in the sheet");
+        if (value_of(work_.value) == 0.0)
+            remarks.reserve("work is 0, or its cell is empty");
+    }
 
 private:
     Flow<Number> work_{0.0, false};

@@ -42,7 +42,7 @@ public:
         Number change = 0.0;
         for (const Component& component : components_)
             change = change + part(component);
-        return {change, std::abs(registry::value_of(change))};
+        return {change, std::abs(value_of(change))};
     }
 
     Term<Number> heat() const { return {Number(0.0), 0.0}; }
@@ -53,7 +53,7 @@ public:
     {
         for (const Component& component : components_)
             visit({"mixing", component.substance ? std::string(component.substance->name) : "component", 0.0, 0.0, 0.0, 0.0,
-                   registry::value_of(part(component)), {}});
+                   value_of(part(component)), {}});
     }
 
     void remarks(Remarks& remarks) const { remarks.source("amounts given in the sheet; ideal mixing"); }
@@ -82,7 +82,7 @@ private:
     Number part(const Component& component) const
     {
         using std::log;
-        if (!(registry::value_of(component.moles) > 0.0))
+        if (!(value_of(component.moles) > 0.0))
             return Number(0.0);
         return molar_gas_constant * component.moles * log(total_ / component.moles);
     }

@@ -20,8 +20,8 @@ public:
         process.start_.p = process.end_.p = reader.pressure(Key::p, standard_pressure);
         if (reader.refused())
             return process;
-        process.start_.phase = &before.at(registry::value_of(process.start_.T));
-        process.end_.phase = &after.at(registry::value_of(process.end_.T));
+        process.start_.phase = &before.at(value_of(process.start_.T));
+        process.end_.phase = &after.at(value_of(process.end_.T));
         if (process.start_.phase == process.end_.phase)
             reader.refuse(ErrorCode::unusable_argument, Key::to,
                           [&] { return std::string("is the same phase as before the change"); });

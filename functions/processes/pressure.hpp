@@ -20,7 +20,7 @@ public:
         process.amount_ = reader.amount(Key::amount, state.substance);
         if (reader.refused())
             return process;
-        const registry::Phase& phase = state.at(registry::value_of(process.start_.T));
+        const registry::Phase& phase = state.at(value_of(process.start_.T));
         process.start_.phase = process.end_.phase = &phase;
         reader.admit(state.substance, phase, process.start_.T, process.start_.p, Key::T);
         reader.admit(state.substance, phase, process.end_.T, process.end_.p, Key::T);

@@ -21,21 +21,26 @@ public:
     Term<Number> entropy() const
     {
         const Number change = heat_.value / T_;
-        return {change, std::abs(registry::value_of(change))};
+        return {change, std::abs(value_of(change))};
     }
 
-    Term<Number> heat() const { return {heat_.value, std::abs(registry::value_of(heat_.value))}; }
+    Term<Number> heat() const { return {heat_.value, std::abs(value_of(heat_.value))}; }
 
     bool rate() const { return heat_.rate; }
 
     void steps(const StepVisitor& visit) const
     {
-        const double T = registry::value_of(T_);
-        visit({registry::value_of(heat_.value) < 0.0 ? "heat leaves" : "heat enters", "reservoir", T, T, 0.0,
-               registry::value_of(heat_.value), registry::value_of(entropy().value), {}});
+        const double T = value_of(T_);
+        visit({value_of(heat_.value) < 0.0 ? "heat leaves" : "heat enters", "reservoir", T, T, 0.0,
+               value_of(heat_.value), value_of(entropy().value), {}});
     }
 
-    void remarks(Remarks& remarks) const { remarks.source("heat given in the sheet"); }
+    void remarks(Remarks& remarks) const
+    {
+        remarks.source("heat given in the sheet");
+        if (value_of(heat_.value) == 0.0)
+            remarks.reserve("heat is 0, or its cell is empty");
+    }
 
 private:
     Flow<Number> heat_{0.0, false};

@@ -22,8 +22,8 @@ public:
         process.start_.p = process.end_.p = reader.pressure(Key::p, standard_pressure);
         if (reader.refused())
             return process;
-        const registry::Phase& before = state.at(registry::value_of(process.start_.T));
-        const registry::Phase& after = state.at(registry::value_of(process.end_.T));
+        const registry::Phase& before = state.at(value_of(process.start_.T));
+        const registry::Phase& after = state.at(value_of(process.end_.T));
         if (&before != &after)
             reader.refuse(ErrorCode::unusable_argument, Key::T_end, [&] {
                 return "between the two temperatures " + shown_state(*state.substance, before) + " changes to "

@@ -46,9 +46,11 @@ public:
 
     bool rate() const { return amount_.rate; }
 
+    TemperatureSpan span() const { return {value_of(start_.T), value_of(end_.T)}; }
+
     void steps(const StepVisitor& visit) const
     {
-        visit_path(*substance_, plain(start_), plain(end_), registry::value_of(amount_.mass), visit);
+        visit_path(*substance_, plain(start_), plain(end_), value_of(amount_.mass), visit);
     }
 
     void remarks(Remarks& remarks) const { remark_on_change(*substance_, plain(start_), plain(end_), remarks); }
@@ -62,13 +64,13 @@ private:
     Term<Number> difference(const Number& before, const Number& after) const
     {
         return {amount_.mass * (after - before),
-                registry::value_of(amount_.mass)
-                    * (std::abs(registry::value_of(before)) + std::abs(registry::value_of(after)))};
+                value_of(amount_.mass)
+                    * (std::abs(value_of(before)) + std::abs(value_of(after)))};
     }
 
     static Point<double> plain(const Point<Number>& point)
     {
-        return {point.phase, registry::value_of(point.T), registry::value_of(point.p)};
+        return {point.phase, value_of(point.T), value_of(point.p)};
     }
 };
 

@@ -19,6 +19,15 @@ using registry::Substance;
 // covers the few millikelvin within which the Gibbs energies of the IAPWS R7-97 regions meet.
 constexpr double at_equilibrium = 0.02;
 
+// So far from equilibrium, in K, a liquid is called hazardous: common practice, no source.
+constexpr double worth_a_caution = 1.0;
+
+// Below this a pressure was perhaps meant in another unit: common practice, no source. Pa.
+constexpr double lowest_usual_pressure = 50.0;
+
+// Above this the ideal gas is spoken of: common practice, no source. Pa.
+constexpr double highest_ideal_pressure = 1e6;
+
 // The phase of lowest Gibbs energy at (T, p), if it is lower than that of `phase` by more than rounding; else null.
 const Phase* more_stable(const Substance& substance, const Phase& phase, double T, double p)
 {
@@ -58,11 +67,13 @@ void remark_on_range(const Substance& substance, const Point<double>& point, Rem
     const double grown = u.relative + beyond * (below ? u.growth_below : u.growth_above);
     if (beyond <= at_equilibrium)
         return;
+    const std::string usual = shown(100.0 * u.relative, 2), now = shown(100.0 * grown, 2);
     remarks.reserve(shown_state(substance, *point.phase) + " at " + shown_temperature(point.T) + " is "
                     + shown(beyond, 3) + " K " + (below ? "below" : "above") + " the range of its source ("
-                    + shown_temperature(edge) + "); the standard uncertainty of its heat capacity grows there from "
-                    + shown(100.0 * u.relative, 2) + " % to " + shown(100.0 * grown, 2)
-                    + " %");
+                    + shown_temperature(edge) + ")"
+                    + (usual == now ? std::string()
+                                    : "; the standard uncertainty of its heat capacity grows there from " + usual + " % to "
+                                          + now + " %"));
 }
 
 void remark_on_stability(const Substance& substance, const Point<double>& point, Remarks& remarks)
@@ -80,9 +91,22 @@ void remark_on_stability(const Substance& substance, const Point<double>& point,
         text += ", " + shown(std::abs(point.T - *T_equilibrium), 3) + " K away from equilibrium with "
               + shown_state(substance, *stable) + " at " + shown_temperature(*T_equilibrium);
     remarks.reserve(std::move(text));
-    if (own == Aggregation::liquid)
+    if (own == Aggregation::liquid && !(T_equilibrium && std::abs(point.T - *T_equilibrium) <= worth_a_caution))
         remarks.caution(stable->aggregation == Aggregation::crystal ? cautions::undercooled_liquid
                                                                     : cautions::superheated_liquid);
+}
+
+// A change of phase to one that is less stable there does not occur by itself, whatever the reservoir.
+void remark_on_direction(const Substance& substance, const Point<double>& start, const Point<double>& end,
+                         Remarks& remarks)
+{
+    const auto T = equilibrium_temperature(substance, *start.phase, *end.phase, start.p);
+    if (T && std::abs(start.T - *T) <= at_equilibrium)
+        return;
+    if (gibbs_energy(*end.phase, end.T, end.p) > gibbs_energy(*start.phase, start.T, start.p))
+        remarks.reserve("at " + shown_temperature(start.T) + " " + shown_state(substance, *start.phase)
+                        + " is more stable than " + shown_state(substance, *end.phase)
+                        + ": the change does not occur there by itself, whatever the reservoir");
 }
 
 void remark_on_point(const Substance& substance, const Point<double>& point, Remarks& remarks)
@@ -92,6 +116,11 @@ void remark_on_point(const Substance& substance, const Point<double>& point, Rem
     remark_on_stability(substance, point, remarks);
     for (const char* caution : cautions::of_state(substance, *point.phase, point.T, point.p))
         remarks.caution(caution);
+    if (point.p < lowest_usual_pressure)
+        remarks.reserve("the pressure is " + shown_pressure(point.p) + "; was another unit meant?");
+    if (is_ideal_gas(*point.phase) && point.p > highest_ideal_pressure)
+        remarks.reserve(shown_state(substance, *point.phase) + " is taken as an ideal gas, also at "
+                        + shown_pressure(point.p) + "; what a real gas differs by is not included");
     if (const std::string_view which = formulation_of(*point.phase, point.T, point.p); !which.empty())
         remarks.note(shown_state(substance, *point.phase) + " by " + std::string(which));
 }
@@ -103,6 +132,8 @@ void remark_on_change(const Substance& substance, const Point<double>& start, co
 {
     remark_on_point(substance, start, remarks);
     remark_on_point(substance, end, remarks);
+    if (start.phase != end.phase && start.T == end.T && start.p == end.p)
+        remark_on_direction(substance, start, end, remarks);
 }
 
 } // namespace entropy_ledger::functions

@@ -7,16 +7,21 @@
 //   bool rate() const;                    // per second: W/K and W
 //   void steps(const StepVisitor&) const; // the path, step by step; its sums are entropy() and heat()
 //   void remarks(Remarks&) const;         // sources, reservations and cautions
+//   TemperatureSpan span() const;         // of a system that exchanges its heat with a reservoir
 // read() leaves a refusal in the reader; the other members are called only when there is none.
 #pragma once
 
 #include "functions/remarks.hpp"
+#include "registry/number.hpp"
 
 #include <cmath>
 #include <functional>
 #include <string>
 
 namespace entropy_ledger::functions {
+
+// For `double`; other number types bring their own, found by argument-dependent look-up.
+using registry::value_of;
 
 // A value and the size of the parts that it is the difference of: its rounding is a few units of the last place of
 // `magnitude`, however small `value` is.
@@ -36,6 +41,12 @@ struct Step {
     double heat = 0.0;       // J
     double entropy = 0.0;    // J/K
     std::string source;      // key of the source, empty where no data come in
+};
+
+// Temperatures of a system at the start and at the end, K.
+struct TemperatureSpan {
+    double start;
+    double end;
 };
 
 using StepVisitor = std::function<void(const Step&)>;

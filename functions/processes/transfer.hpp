@@ -24,7 +24,7 @@ public:
     {
         // One difference of temperatures, so that no digits are lost where the two are close.
         const Number change = heat_.value * (T_from_ - T_to_) / (T_from_ * T_to_);
-        return {change, std::abs(registry::value_of(change))};
+        return {change, std::abs(value_of(change))};
     }
 
     // What one reservoir gives the other takes.
@@ -34,9 +34,9 @@ public:
 
     void steps(const StepVisitor& visit) const
     {
-        const double Q = registry::value_of(heat_.value);
-        const double from = registry::value_of(T_from_);
-        const double to = registry::value_of(T_to_);
+        const double Q = value_of(heat_.value);
+        const double from = value_of(T_from_);
+        const double to = value_of(T_to_);
         visit({"heat leaves", "reservoir", from, from, 0.0, -Q, -Q / from, {}});
         visit({"heat enters", "reservoir", to, to, 0.0, Q, Q / to, {}});
     }
@@ -44,7 +44,9 @@ public:
     void remarks(Remarks& remarks) const
     {
         remarks.source("heat given in the sheet");
-        if (registry::value_of(entropy().value) < 0.0)
+        if (value_of(heat_.value) == 0.0)
+            remarks.reserve("heat is 0, or its cell is empty");
+        if (value_of(entropy().value) < 0.0)
             remarks.reserve("the entropy change is negative: heat does not pass by itself from the colder to the "
                             "warmer; the duty cannot occur as specified");
     }

@@ -4,6 +4,7 @@
 #include "functions/processes/step.hpp"
 #include "registry/number.hpp"
 
+#include <cmath>
 #include <limits>
 #include <span>
 
@@ -14,13 +15,15 @@ namespace entropy_ledger::functions {
 template <class Number>
 Number generation(const Term<Number>& entropy, const Term<Number>& heat, const Number& T_reservoir)
 {
+    using registry::choose;
+    using registry::value_of;
     constexpr double rounding = 32.0 * std::numeric_limits<double>::epsilon();
     const Number difference = entropy.value - heat.value / T_reservoir;
-    const double noise = rounding * (entropy.magnitude + heat.magnitude / registry::value_of(T_reservoir));
+    const double noise = rounding * (entropy.magnitude + heat.magnitude / value_of(T_reservoir));
     const double bounds[] = {-noise, noise};
-    if (!(noise > 0.0))
+    if (!(noise > 0.0 && std::isfinite(noise)))
         return difference;
-    return registry::choose(difference, std::span<const double>(bounds),
+    return choose(difference, std::span<const double>(bounds),
                             [&](std::size_t interval) -> Number { return interval == 1 ? Number(0.0) : difference; });
 }
 

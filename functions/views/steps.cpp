@@ -39,7 +39,13 @@ Result steps_table(const std::function<void(const StepVisitor&)>& steps, bool ra
                                 rate ? "entropy, W/K" : "entropy, J/K", "source"})
         table.cells.emplace_back(std::string(heading));
     table.rows = 1;
-    steps([&](const Step& step) { append(table, step); });
+    bool finite = true; // a step can overflow where their sum does not
+    steps([&](const Step& step) {
+        finite = finite && std::isfinite(step.heat) && std::isfinite(step.entropy);
+        append(table, step);
+    });
+    if (!finite)
+        return error_number(ErrorCode::unusable_argument);
     if (T_reservoir) {
         const double T = *T_reservoir;
         append(table, {heat > 0.0 ? "heat leaves" : "heat enters", "reservoir", T, T, 0.0, -heat, -heat / T, {}});

@@ -21,11 +21,13 @@ inline Result finite(double x)
     return std::isfinite(x) ? x : error_number(ErrorCode::unusable_argument);
 }
 
-// Whether the numbers of a process fit into a double: a huge amount may overflow.
+// Whether the numbers of a process, and of its reservoir, fit into a double: a huge amount may overflow.
 template <class Process>
-bool is_finite(const Process& process)
+bool is_finite(const Process& process, std::optional<double> T_reservoir)
 {
-    return std::isfinite(process.entropy().value) && std::isfinite(process.heat().value);
+    const double heat = process.heat().value;
+    return std::isfinite(process.entropy().value) && std::isfinite(heat)
+        && (!T_reservoir || std::isfinite(heat / *T_reservoir));
 }
 
 struct NumberView {
@@ -65,7 +67,7 @@ struct Steps : NumberView {
     template <class Process>
     static Result show(const Process& process, std::optional<double> T_reservoir)
     {
-        if (!is_finite(process))
+        if (!is_finite(process, T_reservoir))
             return error_number(ErrorCode::unusable_argument);
         return steps_table([&](const StepVisitor& visit) { process.steps(visit); }, process.rate(),
                            process.heat().value, T_reservoir);
@@ -74,9 +76,9 @@ struct Steps : NumberView {
 
 struct Source : NumberView {
     template <class Process>
-    static Result show(const Process& process, std::optional<double>)
+    static Result show(const Process& process, std::optional<double> T_reservoir)
     {
-        if (!is_finite(process))
+        if (!is_finite(process, T_reservoir))
             return error_number(ErrorCode::unusable_argument);
         Remarks remarks;
         process.remarks(remarks);
@@ -84,19 +86,23 @@ struct Source : NumberView {
     }
 };
 
+// What there is to say about the heat exchange with a reservoir at T_reservoir (K) while the system goes through `span`.
+void remark_on_reservoir(Remarks& remarks, const TemperatureSpan& span, double heat, std::optional<double> T_reservoir);
+
 struct Check {
     static constexpr bool wants_words = true;
 
-    // An error in an argument passes through: there is no more to say of it than Calc does.
     static Result refused(const Refusal& refusal) { return "refused: " + refusal.reason; }
 
     template <class Process>
     static Result show(const Process& process, std::optional<double> T_reservoir)
     {
-        if (!is_finite(process))
+        if (!is_finite(process, T_reservoir))
             return "refused: the result is too large for a number; the amount or the heat is out of all bounds";
         Remarks remarks;
         process.remarks(remarks);
+        if constexpr (requires { process.span(); })
+            remark_on_reservoir(remarks, process.span(), process.heat().value, T_reservoir);
         if (T_reservoir && generation(process.entropy(), process.heat(), *T_reservoir) < 0.0)
             remarks.reserve("the generation is negative: with this reservoir the duty cannot occur as specified");
         return remarks.summary();

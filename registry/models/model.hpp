@@ -17,11 +17,12 @@
 #include "registry/models/liquid_water.hpp"
 #include "registry/models/nasa_polynomial.hpp"
 #include "registry/models/steam.hpp"
+#include "registry/models/tabulated_heat_capacity.hpp"
 
 #include <variant>
 
 namespace entropy_ledger::registry {
 
-using Model = std::variant<ConstantHeatCapacity, NasaPolynomial, LiquidWater, IceIh, Steam>;
+using Model = std::variant<ConstantHeatCapacity, NasaPolynomial, LiquidWater, IceIh, Steam, TabulatedHeatCapacity>;
 
 } // namespace entropy_ledger::registry

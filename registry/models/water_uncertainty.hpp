@@ -1,7 +1,7 @@
 // Uncertainty of the heat capacities of water, ice and steam.
 //
 // What the releases state is written from memory. Where they state an expanded uncertainty (coverage factor 2), half
-// of it is taken. The growth is derived from the comparisons with IAPWS-95 described in liquid_water.hpp and steam.hpp.
+// of it is taken. The growth is derived from the comparisons with IAPWS-95 described in water_formulations.hpp.
 #pragma once
 
 #include "registry/phase.hpp"

@@ -30,7 +30,7 @@ EXAMPLES = {
     "items": "Z1:Z4", "heat_items": "Z1:Z4", "amounts": "Y1:Y2", "substances": "X1:X2",
     "capacities": "W1:W2", "temperatures": "V1:V2", "way": '"reversible"',
     "total": "1.5", "generation": "1.5", "entropy_change": "3.5", "uncertainty": "0.1", "coverage": "2",
-    "filter": '"water"', "which": '"lower"',
+    "filter": '"water"', "symbol": '"l"', "T_within": "300", "which": '"lower"',
 }
 
 FUNCTIONS = catalogue.load().functions

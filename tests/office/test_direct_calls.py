@@ -69,6 +69,16 @@ class DirectCalls(unittest.TestCase):
             answer = uno.invoke(self.entropy, "reservoir", (uno.Any("[][]any", empty), 300.0))
             self.assertEqual(error_code(answer), 502, empty)
 
+    def test_a_cell_range_object_keeps_its_shape(self):
+        document = self.office.new_document()
+        self.addCleanup(self.office.close_all)
+        set_values(document, "A1:B3", [[280.0, 1.0], ["", 2.0], [282.0, 3.0]])
+        cells = first_sheet(document)
+        T, amounts = cells.getCellRangeByName("A1:A3"), cells.getCellRangeByName("B1:B3")
+        answer = self.entropy.sensible("water(l)", T, 300.0, amounts, None)
+        self.assertEqual(answer[2][0], self.entropy.sensible("water(l)", 282.0, 300.0, 3.0, None))
+        self.assertTrue(math.isnan(answer[1][0]))
+
     def test_a_cell_range_object_is_a_range(self):
         document = self.office.new_document()
         self.addCleanup(self.office.close_all)

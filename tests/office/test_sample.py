@@ -58,6 +58,7 @@ class Sample(unittest.TestCase):
         verdicts = [value(self.ledger.getCellByPosition(15, r)) for r in range(9, 40)]
         self.assertGreaterEqual(verdicts.count("can occur"), 14)
         self.assertEqual(verdicts.count("cannot occur"), 1)
+        self.assertEqual(self.figure("Total of the duties", "P"), "0 cannot occur")
         self.assertEqual(self.figure("Free cooling", "P"), "cannot occur")
         self.assertLess(self.figure("Free cooling", "N"), 0.0)
         duties = [value(self.ledger.getCellByPosition(13, r)) for r in range(9, self.row("Total of the duties"))]

@@ -35,6 +35,12 @@ class Total(unittest.TestCase):
         self.assertEqual(self.total("B1;B2"), UNUSABLE)
         self.assertEqual(self.total("B1;B2:B3"), UNUSABLE)
 
+    def test_a_range_over_several_sheets_is_refused(self):
+        self.document.Sheets.insertNewByName("Second, with a 'name'.", 1)
+        self.document.Sheets.getByIndex(1).getCellRangeByName("B1").setString("pending")
+        self.assertEqual(self.total("$Sheet1.B1:$'Second, with a ''name''.'.B3"), UNUSABLE)
+        self.assertEqual(self.total("$'Second, with a ''name''.'.C1:C2;4"), 4.0)
+
     def test_a_text_is_an_error(self):
         set_formula(self.document, "B2", "pending")
         self.assertEqual(self.total("B1:B5"), UNUSABLE)

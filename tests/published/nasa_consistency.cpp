@@ -91,7 +91,7 @@ void add_transitions(Spots& spots)
         for (std::size_t i = 0; i + 1 < substance.phases.size(); ++i) {
             const auto* below = std::get_if<registry::NasaPolynomial>(&substance.phases[i].model);
             const auto* above = std::get_if<registry::NasaPolynomial>(&substance.phases[i + 1].model);
-            if (!below || !above || above->gas)
+            if (!below || !above || above->gas || below->origin != &registry::sources::nasa_glenn)
                 continue;
             const double end = below->intervals[below->count - 1].upper, begin = above->intervals[0].lower;
             const std::string where = std::string(substance.name) + "(" + std::string(substance.phases[i].symbol)

@@ -155,7 +155,7 @@ TEST(OurPhases, TheTriplePoint)
     EXPECT_NEAR(boiling, 273.16, 4e-3);
 }
 
-// The range of ice ends on the melting curve, a fifth of a millikelvin above, and holds the equilibrium with the liquid.
+// The range of ice ends a fifth of a millikelvin above the melting curve and holds the equilibrium with the liquid.
 TEST(OurPhases, IceIsFittedUpToItsMelting)
 {
     const auto& phases = registry::find_substance("water").substance->phases;

@@ -1,14 +1,16 @@
 // The computer-program verification tables of the IAPWS releases, to all printed digits.
 //
 // R7-97 and R10-06 values are written from memory of the releases; python3-iapws gives the same digits
-// (water_reference.py computes with it). The printed table of SR6-08 is not at hand: water_reference.cpp checks it
-// against python3-iapws and, with their deviations, against IAPWS-95 and TEOS-10.
+// (water_reference.py computes with it). Of the check values of SR6-08 the temperatures and the enthalpy at 260 K are
+// from memory; the other figures are those of python3-iapws 1.5.2, rounded. water_reference.cpp checks the formulation
+// further against python3-iapws and, with their deviations, against IAPWS-95 and TEOS-10.
 #include "registry/models/iapws_r10.hpp"
 #include "registry/models/iapws_r7_region1.hpp"
 #include "registry/models/iapws_r7_region2.hpp"
 #include "registry/models/iapws_r7_region3.hpp"
 #include "registry/models/iapws_r7_region5.hpp"
 #include "registry/models/iapws_r7_saturation.hpp"
+#include "registry/models/iapws_sr6.hpp"
 
 #include <gtest/gtest.h>
 
@@ -172,6 +174,30 @@ TEST(IapwsR7, Boundary23)
 {
     expect_printed(iapws_r7::boundary_23_pressure(623.15) / 1e6, "0.165291643e2", "623.15 K");
     expect_printed(iapws_r7::boundary_23_temperature(0.165291643e8), "0.623150000e3", "16.5291643 MPa");
+}
+
+// SR6-08, check values at 0.1 MPa
+TEST(IapwsSr6, CheckValues)
+{
+    struct {
+        double T; // K
+        const char* g;
+        const char* v;
+        const char* s;
+        const char* h;
+        const char* cp;
+    } const table[] = {
+        {260.0, "-0.126598915e4", "0.100294026e-2", "-0.209985548e3", "-0.558622317e5", "0.430017472e4"},
+        {298.15, "-0.456175371e4", "0.100296173e-2", "0.367201448e3", "0.104919358e6", "0.418144618e4"},
+        {375.0, "-0.710588021e5", "0.104492148e-2", "0.132806616e4", "0.426966009e6", "0.421774697e4"},
+    };
+    for (const auto& row : table) {
+        expect_printed(iapws_sr6::gibbs_energy(row.T, 1e5), row.g, "g");
+        expect_printed(iapws_sr6::volume(row.T), row.v, "v");
+        expect_printed(iapws_sr6::entropy(row.T, 1e5), row.s, "s");
+        expect_printed(iapws_sr6::enthalpy(row.T, 1e5), row.h, "h");
+        expect_printed(iapws_sr6::heat_capacity(row.T, 1e5), row.cp, "cp");
+    }
 }
 
 // R10-06 Table 6

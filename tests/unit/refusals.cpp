@@ -111,6 +111,67 @@ TEST(Refusals, WorkTurnedToHeatIsNotNegative)
     EXPECT_NE(words("CHECK.DISSIPATION", {-5.0, 300}).find("work"), std::string::npos);
 }
 
+TEST(Refusals, OverflowIsNeverAZeroOrInfinity)
+{
+    EXPECT_NEAR(value("GENERATION.BODY", {1e306, 300, 301, 290}) / 1e304, value("GENERATION.BODY", {100.0, 300, 301, 290}), 1e-9);
+    EXPECT_EQ(code_of(call("GENERATION.SENSIBLE", {"water(l)", 280, 290, 1, 1e-305})), unusable);
+    EXPECT_EQ(words("CHECK.SENSIBLE", {"water(l)", 280, 290, 1, 1e-305}).rfind("refused", 0), 0u);
+    EXPECT_EQ(code_of(call("STEPS.SENSIBLE", {"water(l)", 280, 290, 1, 1e-305})), unusable);
+    EXPECT_EQ(code_of(call("STEPS.TRANSFER", {1e300, 1e-20, 1e-20})), unusable);
+}
+
+TEST(Refusals, AnElementIsNotACompoundInSmallLetters)
+{
+    for (const char* state : {"Hf(g)", "Bi(g)", "Po(g)"})
+        EXPECT_EQ(code_of(call("DATA.ENTROPY", {state, 300})), unusable) << state;
+    EXPECT_GT(value("DATA.ENTROPY", {"hf(g)", 300}), 0.0) << "HF in small letters";
+}
+
+TEST(Refusals, NoPhaseChangeAboveTheCriticalPressure)
+{
+    EXPECT_NEAR(value("TEMPERATURE.BALANCE", {"water", "l", "g", "220 bar"}), 646.9, 0.1);
+    for (const char* p : {"220.64 bar", "250 bar", "300 bar", "900 bar"})
+        EXPECT_EQ(code_of(call("TEMPERATURE.BALANCE", {"water", "l", "g", p})), no_data) << p;
+}
+
+TEST(Refusals, ASingleCellOfARangeIsACell)
+{
+    const Range one = Range::column({text("water(l)")});
+    EXPECT_TRUE(std::holds_alternative<functions::MixedTable>(call("STEPS.SENSIBLE", {one, 280, 290, 1})));
+}
+
+TEST(Check, NotesCrossingTemperatures)
+{
+    for (const auto& arguments : {std::vector<Input>{"water(l)", "15 °C", "80 °C", 1000, "70 °C"},
+                                  std::vector<Input>{"water(l)", "80 °C", "15 °C", 1000, "20 °C"}})
+        EXPECT_NE(words("CHECK.SENSIBLE", arguments).find("temperatures cross"), std::string::npos);
+    EXPECT_NE(words("CHECK.BODY", {"3.9 kJ/K", "20 °C", "60 °C", "50 °C"}).find("temperatures cross"), std::string::npos);
+    EXPECT_EQ(words("CHECK.SENSIBLE", {"water(l)", "15 °C", "80 °C", 1000, "90 °C"}).rfind("ok", 0), 0u);
+    EXPECT_EQ(words("CHECK.SENSIBLE", {"water(l)", "80 °C", "20 °C", 1000, "20 °C"}).rfind("ok", 0), 0u);
+}
+
+TEST(Check, NotesChangesThatDoNotOccurByThemselves)
+{
+    EXPECT_NE(words("CHECK.PHASE", {"water", "cr", "l", "-6 °C", 1, "20 °C"}).find("does not occur there by itself"),
+              std::string::npos);
+    EXPECT_EQ(words("CHECK.PHASE", {"water", "l", "cr", "-6 °C", 1, "-6 °C"}).find("does not occur"), std::string::npos);
+}
+
+TEST(Check, AsksWhereAUnitMayBeMistaken)
+{
+    EXPECT_NE(words("CHECK.PHASE", {"water", "l", "cr", "-6 °C", 1, 10}).find("were °C meant"), std::string::npos);
+    EXPECT_NE(words("CHECK.SENSIBLE", {"N2(g)", 290, 300, 1, 280, 3}).find("another unit"), std::string::npos);
+    EXPECT_NE(words("CHECK.SENSIBLE", {"N2(g)", 290, 300, 1, 310, "100 bar"}).find("ideal gas"), std::string::npos);
+    EXPECT_NE(words("CHECK.RESERVOIR", {0, 300}).find("its cell is empty"), std::string::npos);
+}
+
+TEST(Check, CautionsComeFirst)
+{
+    const std::string check = words("CHECK.PHASE", {"water", "l", "cr", "-6 °C", 1, "-10 °C"});
+    EXPECT_EQ(check.rfind("CAUTION: ", 0), 0u) << check;
+    EXPECT_EQ(check.find("local code"), check.rfind("local code")) << "said once";
+}
+
 TEST(Refusals, TooManyArguments)
 {
     EXPECT_EQ(code_of(call("ENTROPY.RESERVOIR", {1.0, 300, 4.0})), unusable);

@@ -1,0 +1,36 @@
+#include "functions/views/views.hpp"
+
+#include <algorithm>
+
+namespace entropy_ledger::functions::views {
+
+namespace {
+
+// Reservoirs colder than this are asked about: common practice, no source. K.
+constexpr double coldest_usual_reservoir = 120.0;
+
+// Temperatures this close do not count as crossing: rounding of °C to K. K.
+constexpr double touching = 0.02;
+
+} // namespace
+
+void remark_on_reservoir(Remarks& remarks, const TemperatureSpan& span, double heat, std::optional<double> T_reservoir)
+{
+    if (!T_reservoir) {
+        remarks.note("no T_reservoir given, which GENERATION. needs");
+        return;
+    }
+    if (*T_reservoir < coldest_usual_reservoir)
+        remarks.reserve("T_reservoir is " + shown_temperature(*T_reservoir) + "; were °C meant?");
+    // The sign of the total does not show that a part of the heat would have to pass from colder to warmer.
+    const double hottest = std::max(span.start, span.end);
+    const double coldest = std::min(span.start, span.end);
+    if (heat > 0.0 && hottest > *T_reservoir + touching)
+        remarks.reserve("temperatures cross: the system is at " + shown_temperature(hottest) + ", and heat does not pass to it by "
+                        "itself from the reservoir at " + shown_temperature(*T_reservoir) + "; the total's sign does not show that");
+    else if (heat < 0.0 && coldest < *T_reservoir - touching)
+        remarks.reserve("temperatures cross: the system is at " + shown_temperature(coldest) + ", and heat does not pass from it by "
+                        "itself to the reservoir at " + shown_temperature(*T_reservoir) + "; the total's sign does not show that");
+}
+
+} // namespace entropy_ledger::functions::views
