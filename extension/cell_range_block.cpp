@@ -3,17 +3,21 @@
 #include <com/sun/star/beans/XPropertySet.hpp>
 #include <com/sun/star/container/XIndexAccess.hpp>
 #include <com/sun/star/sheet/CellFlags.hpp>
+#include <com/sun/star/sheet/XCellRangeAddressable.hpp>
 #include <com/sun/star/sheet/XCellRangeData.hpp>
 #include <com/sun/star/sheet/XCellRangesQuery.hpp>
 #include <com/sun/star/sheet/XSheetCellRanges.hpp>
+#include <com/sun/star/table/CellRangeAddress.hpp>
 #include <com/sun/star/table/XCell.hpp>
 
+#include <algorithm>
 #include <cstdint>
 
 namespace entropy_ledger::extension {
 
 using com::sun::star::sheet::XCellRangeData;
 using com::sun::star::sheet::XCellRangesQuery;
+using com::sun::star::table::CellRangeAddress;
 using com::sun::star::table::XCellRange;
 using com::sun::star::uno::Any;
 using com::sun::star::uno::Reference;
@@ -34,6 +38,13 @@ bool spans_sheets(const Reference<XCellRange>& range)
     return colon >= 0 && name.indexOf('.', colon) >= 0; // no sheet name holds a colon
 }
 
+CellRangeAddress address_of(const Any& range)
+{
+    return Reference<com::sun::star::sheet::XCellRangeAddressable>(range, UNO_QUERY_THROW)->getRangeAddress();
+}
+
+CellRangeAddress address_of(const Reference<XCellRange>& range) { return address_of(Any(range)); }
+
 } // namespace
 
 CellRangeBlock::CellRangeBlock(const Reference<XCellRange>& range)
@@ -48,9 +59,19 @@ CellRangeBlock::CellRangeBlock(const Reference<XCellRange>& range)
         query->queryContentCells(static_cast<sal_Int16>(flags::VALUE | flags::DATETIME | flags::STRING
                                                         | flags::FORMULA)),
         UNO_QUERY_THROW);
+    // Where the asked columns hold nothing, LibreOffice 7.4 answers with cells beside them: only what lies inside counts.
+    const CellRangeAddress asked = address_of(range);
     const sal_Int32 count = areas->getCount();
-    for (sal_Int32 i = 0; i < count; ++i)
-        read_area(Reference<XCellRange>(areas->getByIndex(i), UNO_QUERY_THROW));
+    for (sal_Int32 i = 0; i < count; ++i) {
+        const CellRangeAddress area = address_of(areas->getByIndex(i));
+        const sal_Int32 left = std::max(asked.StartColumn, area.StartColumn);
+        const sal_Int32 right = std::min(asked.EndColumn, area.EndColumn);
+        const sal_Int32 top = std::max(asked.StartRow, area.StartRow);
+        const sal_Int32 bottom = std::min(asked.EndRow, area.EndRow);
+        if (left <= right && top <= bottom)
+            read_area(range->getCellRangeByPosition(left - asked.StartColumn, top - asked.StartRow,
+                                                    right - asked.StartColumn, bottom - asked.StartRow));
+    }
 }
 
 void CellRangeBlock::read_area(const Reference<XCellRange>& area)

@@ -11,7 +11,7 @@ const char* const superheated_liquid
 namespace {
 
 const char* const steam = "hot water and steam under pressure scald and burst vessels (pressure-equipment code)";
-const char* const melt = "a hot melt burns, and meeting water or damp material it can explode";
+const char* const melt = "a hot melt or oil burns, and meeting water or damp material it can spatter or explode";
 const char* const ammonia = "ammonia is toxic and burns eyes and lungs (refrigeration code)";
 
 constexpr double scalding = 333.15;      // K, 60 °C

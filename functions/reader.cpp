@@ -2,6 +2,7 @@
 
 #include "functions/user_table.hpp"
 #include "functions/wording.hpp"
+#include "registry/equilibrium.hpp"
 
 #include <cmath>
 #include <optional>
@@ -222,6 +223,15 @@ const registry::Substance* Reader::substance(Key key)
 
 State Reader::state(Key key)
 {
+    const State found = state_or_wet(key);
+    if (found.vapour)
+        refuse(ErrorCode::unusable_argument, key,
+               [] { return "liquid and vapour together can stand in CHANGE, DATA.ENTHALPY and DATA.ENTROPY only"; });
+    return found;
+}
+
+State Reader::state_or_wet(Key key)
+{
     if (const UserTable* own = table(key)) {
         StateProblem none{false, false, {}};
         const auto named = own->state().empty() ? std::nullopt : state_of(own->substance(), own->state(), none);
@@ -246,7 +256,32 @@ State Reader::state_beside_table(Key key, Key other)
         if (const UserTable* own = table(other))
             return state(&own->substance(), key);
     }
-    return state(key);
+    return state_or_wet(key);
+}
+
+double Reader::pressure_of(const State& state, double T, Key key, double when_left_out)
+{
+    // So far, in K, a temperature may lie from equilibrium at the pressure given beside it.
+    constexpr double agreement = 0.02;
+    if (!state.vapour || refused_)
+        return pressure(key, when_left_out);
+    if (!given(key)) {
+        const auto p = registry::equilibrium_pressure(*state.phase, *state.vapour, T);
+        if (!p)
+            refuse(ErrorCode::not_available, key, [&] {
+                return "liquid and vapour are not together at " + shown_temperature(T);
+            });
+        return p.value_or(when_left_out);
+    }
+    const double p = pressure(key, when_left_out);
+    const auto equilibrium = registry::equilibrium_temperature(*state.substance, *state.phase, *state.vapour, p);
+    if (!refused_ && !(equilibrium && std::abs(*equilibrium - T) <= agreement))
+        refuse(ErrorCode::unusable_argument, key, [&] {
+            return "at " + shown_pressure(p) + " liquid and vapour are together "
+                 + (equilibrium ? "at " + shown_temperature(*equilibrium) : std::string("nowhere")) + ", not at "
+                 + shown_temperature(T) + "; leave the pressure out for the one that fits";
+        });
+    return p;
 }
 
 State Reader::state(const registry::Substance* substance, Key symbol)
@@ -256,6 +291,8 @@ State Reader::state(const registry::Substance* substance, Key symbol)
         return {};
     StateProblem problem{wants_words_, false, {}};
     const std::optional<State> found = state_of(*substance, typed, problem);
+    if (found && found->vapour)
+        refuse(ErrorCode::unusable_argument, symbol, [] { return "one phase is wanted, not liquid and vapour together"; });
     if (found)
         return *found;
     refuse(problem.no_data ? ErrorCode::not_available : ErrorCode::unusable_argument, symbol,

@@ -55,9 +55,13 @@ public:
     std::string_view text(Key key);
 
     const registry::Substance* substance(Key key);
-    State state(Key key);
+    State state(Key key); // of one phase
+    State state_or_wet(Key key);
     // The same where a state symbol alone ("l") means the substance of the table in `other`.
     State state_beside_table(Key key, Key other);
+    // The pressure of a state of liquid and vapour together at temperature T: the equilibrium pressure, or the argument
+    // `key` when it is given and fits it. For another state as pressure().
+    double pressure_of(const State& state, double T, Key key, double when_left_out);
     State state(const registry::Substance* substance, Key symbol);
     Amount<double> amount(Key key, const registry::Substance* substance); // above 0
 

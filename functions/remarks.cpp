@@ -22,7 +22,13 @@ void Remarks::add(std::vector<std::string>& list, std::string text)
         list.push_back(std::move(text));
 }
 
-void Remarks::source(const registry::Source& source) { add(sources_, std::string(source.citation)); }
+void Remarks::source(const registry::Source& source, std::string_view state, std::string_view what_it_says_of_it)
+{
+    add(sources_, std::string(source.citation));
+    if (!what_it_says_of_it.empty())
+        add(sources_, std::string(state) + ": " + std::string(what_it_says_of_it));
+}
+
 void Remarks::source(std::string_view text) { add(sources_, std::string(text)); }
 void Remarks::note(std::string text) { add(notes_, std::move(text)); }
 void Remarks::reserve(std::string text) { add(reservations_, std::move(text)); }

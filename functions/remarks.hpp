@@ -12,7 +12,7 @@ namespace entropy_ledger::functions {
 class Remarks {
 public:
     // Keeps each source once, in the order of first mention.
-    void source(const registry::Source& source);
+    void source(const registry::Source& source, std::string_view state, std::string_view what_it_says_of_it);
     // A source that is no publication, such as "given in the sheet".
     void source(std::string_view text);
 

@@ -1,5 +1,7 @@
 #include "functions/state.hpp"
 
+#include "functions/quantity.hpp"
+
 #include <algorithm>
 #include <array>
 #include <utility>
@@ -27,10 +29,11 @@ std::string_view trimmed(std::string_view text)
 char lower(char c) { return c >= 'A' && c <= 'Z' ? static_cast<char>(c - 'A' + 'a') : c; }
 
 // Words for states of aggregation.
-constexpr std::array<std::pair<std::string_view, std::string_view>, 13> symbol_words{{
+constexpr std::array<std::pair<std::string_view, std::string_view>, 14> symbol_words{{
     {"s", "cr"}, {"solid", "cr"}, {"crystal", "cr"}, {"ice", "cr"}, {"cr", "cr"},
     {"liquid", "l"}, {"l", "l"}, {"melt", "l"},
     {"gas", "g"}, {"vapour", "g"}, {"vapor", "g"}, {"steam", "g"}, {"g", "g"},
+    {"l+g", "l+g"},
 }};
 
 // Words for whole states.
@@ -210,6 +213,37 @@ const Substance* read_substance(std::string_view text, StateProblem& problem)
     return look_up(split.substance, problem);
 }
 
+namespace {
+
+// Liquid and vapour together: "l+g,x=0.85".
+std::optional<State> wet_state(const Substance& substance, std::string_view symbol, StateProblem& problem)
+{
+    constexpr std::string_view opening = "l+g,x=";
+    const Reading quality = symbol.starts_with(opening) ? read_quantity(symbol.substr(opening.size())) : Reading(Unreadable{});
+    const auto* x = std::get_if<Quantity>(&quality);
+    if (!x || (x->has_unit && x->dimension != dimensions::dimensionless) || !(x->value >= 0.0 && x->value <= 1.0)) {
+        report(problem, false, [] { return "liquid and vapour together need a quality from 0 to 1, as in \"water(l+g,x=0.85)\""; });
+        return std::nullopt;
+    }
+    State state{&substance, nullptr, Aggregation::liquid};
+    state.quality = x->value;
+    for (const Phase& phase : substance.phases) {
+        if (phase.symbol == "l")
+            state.phase = &phase;
+        else if (phase.symbol == "g")
+            state.vapour = &phase;
+    }
+    if (!state.phase || !state.vapour) {
+        report(problem, true, [&] {
+            return "there are no data for liquid and vapour together; there is " + shown_states(substance);
+        });
+        return std::nullopt;
+    }
+    return state;
+}
+
+} // namespace
+
 std::optional<State> state_of(const Substance& substance, std::string_view symbol, StateProblem& problem)
 {
     const std::string normal = normal_symbol(symbol);
@@ -219,6 +253,8 @@ std::optional<State> state_of(const Substance& substance, std::string_view symbo
             });
         return std::nullopt;
     }
+    if (normal.starts_with("l+g"))
+        return wet_state(substance, normal, problem);
     State state{&substance, nullptr, aggregation_of_symbol(normal)};
     std::size_t candidates = 0;
     for (const Phase& phase : substance.phases) {

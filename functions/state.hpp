@@ -11,7 +11,7 @@ namespace entropy_ledger::functions {
 
 // A state symbol in normal form: "cr", "l", "g", with a modification "cr,alpha". "s" is read as "cr", Greek letters by
 // their names, blanks and case ignored; the words solid, crystal, ice, liquid, melt, gas, vapour, steam stand for their symbols.
-// Empty when the text is no state symbol. Bounded: over 40 bytes is none.
+// "l+g,x=0.85" is liquid and vapour together with a quality. Empty when the text is no state symbol. Bounded: over 40 bytes is none.
 std::string normal_symbol(std::string_view text);
 
 // The state of aggregation of a symbol in normal form.
@@ -24,6 +24,8 @@ struct State {
     const registry::Phase* phase = nullptr;  // null: one of several
     registry::Aggregation aggregation = registry::Aggregation::gas;
     bool any_aggregation = false;
+    const registry::Phase* vapour = nullptr; // of wet steam and its like, whose liquid `phase` is
+    double quality = 0.0;                    // mass of the vapour over that of both
 
     // Whether `candidate` is one of the phases that may be meant.
     bool may_be(const registry::Phase& candidate) const;

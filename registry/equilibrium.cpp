@@ -99,4 +99,35 @@ std::optional<double> equilibrium_temperature(const Substance& substance, const 
     return std::nullopt;
 }
 
+std::optional<double> equilibrium_pressure(const Phase& liquid, const Phase& gas, double T)
+{
+    const auto both_have_values = [&](double p) {
+        return limits_of(liquid, p).trust.contains(T) && limits_of(gas, p).trust.contains(T);
+    };
+    const auto difference = [&](double logarithm) {
+        const double p = std::exp(logarithm);
+        return gibbs_energy(liquid, T, p) - gibbs_energy(gas, T, p);
+    };
+    // Steps of 1 %: a supersaturated vapour has values at least so far beyond its equilibrium.
+    constexpr double step = 0.01;
+    const double last = std::log(1e8);
+    double lower = 0.0;
+    bool lower_has_values = both_have_values(1.0);
+    for (double upper = step; upper <= last; upper += step) {
+        const bool upper_has_values = both_have_values(std::exp(upper));
+        if (lower_has_values && upper_has_values) {
+            const double at_lower = difference(lower);
+            const double at_upper = difference(upper);
+            if (at_lower * at_upper <= 0.0) {
+                const double p = std::exp(root(difference, lower, upper, at_lower, at_upper));
+                if (!touch(liquid, gas, T, p))
+                    return p;
+            }
+        }
+        lower = upper;
+        lower_has_values = upper_has_values;
+    }
+    return std::nullopt;
+}
+
 } // namespace entropy_ledger::registry

@@ -21,4 +21,8 @@ Number gibbs_energy(const Phase& phase, const Number& T, const Number& p)
 std::optional<double> equilibrium_temperature(const Substance& substance, const Phase& first, const Phase& second,
                                               double p);
 
+// The pressure in Pa at which a liquid and a gas are in equilibrium at temperature T in K; otherwise as above. From 1 Pa to
+// 100 MPa.
+std::optional<double> equilibrium_pressure(const Phase& liquid, const Phase& gas, double T);
+
 } // namespace entropy_ledger::registry

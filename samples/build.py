@@ -14,11 +14,13 @@ from office_session import OfficeSession  # noqa: E402
 
 def main() -> None:
     with OfficeSession(extensions=Path(sys.argv[1])) as office:
-        from ledger_sheet import LedgerSheet  # needs the office's types
-        document = office.new_document()
-        LedgerSheet(document).make()
-        document.calculateAll()
-        office.store(document, HERE / "dairy-ledger.ods")
+        from ledger_sheet import LedgerSheet  # these need the office's types
+        from own_table import OwnTableSheet
+        for make, name in ((LedgerSheet, "dairy-ledger.ods"), (OwnTableSheet, "own-table.ods")):
+            document = office.new_document()
+            make(document).make()
+            document.calculateAll()
+            office.store(document, HERE / name)
 
 
 main()

@@ -9,20 +9,23 @@ namespace entropy_ledger::functions::plain {
 
 namespace {
 
+// With `wet`, liquid and vapour together may stand for the state; the property is then the mean by quality.
 template <class Property>
-Result property_of_state(const Entry& entry, std::span<const Cell> cells, Property&& property)
+Result property_of_state(const Entry& entry, std::span<const Cell> cells, bool wet, Property&& property)
 {
     Reader reader(entry, cells, false);
-    const State state = reader.state(Key::state);
+    const State state = wet ? reader.state_or_wet(Key::state) : reader.state(Key::state);
     const double T = reader.temperature(Key::T);
-    const double p = reader.pressure(Key::p, standard_pressure);
+    const double p = reader.pressure_of(state, T, Key::p, standard_pressure);
     if (reader.refused())
         return reader.refusal().error;
     const registry::Phase& phase = state.at(T);
     reader.admit(state.substance, phase, T, p, Key::T);
     if (reader.refused())
         return reader.refusal().error;
-    const double value = property(phase, T, p);
+    double value = property(phase, T, p);
+    if (state.vapour)
+        value += state.quality * (property(*state.vapour, T, p) - value);
     return std::isfinite(value) ? value : error_number(ErrorCode::unusable_argument);
 }
 
@@ -49,21 +52,21 @@ registry::Limits range_of(const State& state)
 
 Result data_heatcapacity(const Entry& entry, std::span<const Cell> cells)
 {
-    return property_of_state(entry, cells, [](const registry::Phase& phase, double T, double p) {
+    return property_of_state(entry, cells, false, [](const registry::Phase& phase, double T, double p) {
         return registry::heat_capacity(phase, T, p);
     });
 }
 
 Result data_enthalpy(const Entry& entry, std::span<const Cell> cells)
 {
-    return property_of_state(entry, cells, [](const registry::Phase& phase, double T, double p) {
+    return property_of_state(entry, cells, true, [](const registry::Phase& phase, double T, double p) {
         return registry::enthalpy(phase, T, p);
     });
 }
 
 Result data_entropy(const Entry& entry, std::span<const Cell> cells)
 {
-    return property_of_state(entry, cells, [](const registry::Phase& phase, double T, double p) {
+    return property_of_state(entry, cells, true, [](const registry::Phase& phase, double T, double p) {
         return registry::entropy(phase, T, p);
     });
 }

@@ -18,8 +18,8 @@ public:
         process.start_.T = reader.temperature(Key::T_start);
         process.end_.T = reader.temperature(Key::T_end);
         process.amount_ = reader.amount(Key::amount, before.substance);
-        process.start_.p = reader.pressure(Key::p_start, standard_pressure);
-        process.end_.p = reader.pressure(Key::p_end, value_of(process.start_.p));
+        process.start_.p = reader.pressure_of(before, value_of(process.start_.T), Key::p_start, standard_pressure);
+        process.end_.p = reader.pressure_of(after, value_of(process.end_.T), Key::p_end, value_of(process.start_.p));
         if (reader.refused())
             return process;
         if (before.substance != after.substance) {
@@ -29,8 +29,8 @@ public:
             });
             return process;
         }
-        process.start_.phase = &before.at(value_of(process.start_.T));
-        process.end_.phase = &after.at(value_of(process.end_.T));
+        process.start_.set_phase(before);
+        process.end_.set_phase(after);
         reader.admit(before.substance, *process.start_.phase, process.start_.T, process.start_.p, Key::T_start);
         reader.admit(before.substance, *process.end_.phase, process.end_.T, process.end_.p, Key::T_end);
         return process;

@@ -11,13 +11,37 @@
 
 namespace entropy_ledger::functions {
 
-// A phase at a temperature in K and a pressure in Pa.
+// A phase at a temperature in K and a pressure in Pa; or a liquid with its vapour, of the given quality.
 template <class Number>
 struct Point {
     const registry::Phase* phase = nullptr;
     Number T = 300.0;
     Number p = standard_pressure;
+    const registry::Phase* vapour = nullptr;
+    double quality = 0.0; // mass of the vapour over that of both
+
+    void set_phase(const State& state)
+    {
+        phase = &state.at(value_of(T));
+        vapour = state.vapour;
+        quality = state.quality;
+    }
 };
+
+// Specific entropy, J/(kg K), and enthalpy, J/kg.
+template <class Number>
+Number entropy_at(const Point<Number>& point)
+{
+    const Number s = registry::entropy(*point.phase, point.T, point.p);
+    return point.vapour ? s + point.quality * (registry::entropy(*point.vapour, point.T, point.p) - s) : s;
+}
+
+template <class Number>
+Number enthalpy_at(const Point<Number>& point)
+{
+    const Number h = registry::enthalpy(*point.phase, point.T, point.p);
+    return point.vapour ? h + point.quality * (registry::enthalpy(*point.vapour, point.T, point.p) - h) : h;
+}
 
 // Lays out the path of a change of `mass` kg and visits its steps.
 void visit_path(const registry::Substance& substance, const Point<double>& start, const Point<double>& end, double mass,
@@ -32,16 +56,12 @@ class StateChange {
 public:
     Term<Number> entropy() const
     {
-        const Number before = registry::entropy(*start_.phase, start_.T, start_.p);
-        const Number after = registry::entropy(*end_.phase, end_.T, end_.p);
-        return difference(before, after);
+        return difference(entropy_at(start_), entropy_at(end_));
     }
 
     Term<Number> heat() const
     {
-        const Number before = registry::enthalpy(*start_.phase, start_.T, start_.p);
-        const Number after = registry::enthalpy(*end_.phase, end_.T, end_.p);
-        return difference(before, after);
+        return difference(enthalpy_at(start_), enthalpy_at(end_));
     }
 
     bool rate() const { return amount_.rate; }
@@ -70,7 +90,7 @@ private:
 
     static Point<double> plain(const Point<Number>& point)
     {
-        return {point.phase, value_of(point.T), value_of(point.p)};
+        return {point.phase, value_of(point.T), value_of(point.p), point.vapour, point.quality};
     }
 };
 

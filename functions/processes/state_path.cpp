@@ -1,5 +1,6 @@
 // The path of a change of state, step by step, for STEPS.
 #include "functions/processes/state_change.hpp"
+#include "functions/wording.hpp"
 #include "registry/phase_sequence.hpp"
 
 namespace entropy_ledger::functions {
@@ -22,6 +23,14 @@ const char* name_of_change(Aggregation from, Aggregation to)
     return to == Aggregation::liquid ? "condensation" : "deposition";
 }
 
+// "water(l)" or "water(l+g,x=0.85)"
+std::string shown_point(const Substance& substance, const Point<double>& point)
+{
+    if (!point.vapour)
+        return shown_state(substance, *point.phase);
+    return std::string(substance.name) + "(l+g,x=" + shown(point.quality, 4) + ")";
+}
+
 // Visits the step from one point to the next, unless nothing happens.
 class StepMaker {
 public:
@@ -30,18 +39,21 @@ public:
 
     void operator()(const Point<double>& from, const Point<double>& to) const
     {
-        if (from.phase == to.phase && from.T == to.T && from.p == to.p)
+        if (from.phase == to.phase && from.T == to.T && from.p == to.p && from.vapour == to.vapour)
             return;
         Step step;
         step.T_start = from.T;
         step.T_end = to.T;
         step.p = to.p;
-        step.heat = mass_ * (enthalpy(*to.phase, to.T, to.p) - enthalpy(*from.phase, from.T, from.p));
-        step.entropy = mass_ * (entropy(*to.phase, to.T, to.p) - entropy(*from.phase, from.T, from.p));
-        step.state = shown_state(substance_, *from.phase);
-        if (from.phase != to.phase) {
+        step.heat = mass_ * (enthalpy_at(to) - enthalpy_at(from));
+        step.entropy = mass_ * (entropy_at(to) - entropy_at(from));
+        step.state = shown_point(substance_, from);
+        if (from.vapour != to.vapour) {
+            step.what = step.heat > 0.0 ? "boiling" : "condensation";
+            step.state += " → " + shown_point(substance_, to);
+        } else if (from.phase != to.phase) {
             step.what = name_of_change(from.phase->aggregation, to.phase->aggregation);
-            step.state += " → " + shown_state(substance_, *to.phase);
+            step.state += " → " + shown_point(substance_, to);
         } else if (from.T == to.T) {
             step.what = "change of pressure";
         } else {
@@ -89,10 +101,25 @@ void visit_phases(const StepMaker& step, const Substance& substance, const Point
 
 } // namespace
 
-void visit_path(const Substance& substance, const Point<double>& start, const Point<double>& end, double mass,
+namespace {
+
+// The part of a wet point that a path to or from `other` begins with: its vapour towards a gas, else its liquid.
+Point<double> dry(const Point<double>& point, const Point<double>& other)
+{
+    if (!point.vapour)
+        return point;
+    return {other.phase->aggregation == Aggregation::gas ? point.vapour : point.phase, point.T, point.p};
+}
+
+} // namespace
+
+void visit_path(const Substance& substance, const Point<double>& first, const Point<double>& last, double mass,
                 const StepVisitor& visit)
 {
     const StepMaker step(substance, mass, visit);
+    const Point<double> start = dry(first, last);
+    const Point<double> end = dry(last, first);
+    step(first, start);
     // The change of pressure first, where the phase at the start has values at the final pressure, else last.
     const bool pressure_first = has_value(*start.phase, start.T, end.p);
     const Point<double> begin{start.phase, start.T, pressure_first ? end.p : start.p};
@@ -103,6 +130,7 @@ void visit_path(const Substance& substance, const Point<double>& start, const Po
     else // a change at one temperature does not detour through a third phase
         visit_phases(step, substance, begin, finish, start.T == end.T);
     step(finish, end);
+    step(end, last);
 }
 
 } // namespace entropy_ledger::functions

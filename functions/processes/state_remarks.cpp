@@ -111,7 +111,12 @@ void remark_on_direction(const Substance& substance, const Point<double>& start,
 
 void remark_on_point(const Substance& substance, const Point<double>& point, Remarks& remarks)
 {
-    remarks.source(source_of(*point.phase, point.T, point.p));
+    const registry::Source& source = source_of(*point.phase, point.T, point.p);
+    const std::string state = shown_state(substance, *point.phase);
+    remarks.source(source, state, point.phase->remark);
+    // The NASA set's remarks only name its own sources.
+    if (&source != &registry::sources::nasa_glenn && !point.phase->remark.empty())
+        remarks.note(state + ": " + std::string(point.phase->remark));
     remark_on_range(substance, point, remarks);
     remark_on_stability(substance, point, remarks);
     for (const char* caution : cautions::of_state(substance, *point.phase, point.T, point.p))
@@ -130,9 +135,17 @@ void remark_on_point(const Substance& substance, const Point<double>& point, Rem
 void remark_on_change(const Substance& substance, const Point<double>& start, const Point<double>& end,
                       Remarks& remarks)
 {
-    remark_on_point(substance, start, remarks);
-    remark_on_point(substance, end, remarks);
-    if (start.phase != end.phase && start.T == end.T && start.p == end.p)
+    for (const Point<double>* point : {&start, &end}) {
+        remark_on_point(substance, *point, remarks);
+        if (point->vapour)
+            remark_on_point(substance, {point->vapour, point->T, point->p}, remarks);
+    }
+    const bool to_or_from_gas = (start.phase->aggregation == Aggregation::gas) != (end.phase->aggregation == Aggregation::gas);
+    const Phase& gas = start.phase->aggregation == Aggregation::gas ? *start.phase : *end.phase;
+    if (to_or_from_gas && is_ideal_gas(gas))
+        remarks.reserve("the vapour is taken as an ideal gas of single molecules, " + shown_state(substance, gas)
+                        + "; vapours that associate or decompose (sulfur, salts, oxides) boil quite otherwise");
+    if (!start.vapour && !end.vapour && start.phase != end.phase && start.T == end.T && start.p == end.p)
         remark_on_direction(substance, start, end, remarks);
 }
 

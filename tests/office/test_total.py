@@ -35,6 +35,11 @@ class Total(unittest.TestCase):
         self.assertEqual(self.total("B1;B2"), UNUSABLE)
         self.assertEqual(self.total("B1;B2:B3"), UNUSABLE)
 
+    def test_an_empty_range_is_nothing_whatever_stands_beside_it(self):
+        for address in ("A1", "A7", "D1"):
+            self.assertEqual(value(set_formula(self.document, address, "=ENTROPY.TOTAL(C1:C2;4)")), 4.0, address)
+        self.assertEqual(value(set_formula(self.document, "A9", "=ENTROPY.TOTAL(E1:G5)")), 0.0)
+
     def test_a_range_over_several_sheets_is_refused(self):
         self.document.Sheets.insertNewByName("Second, with a 'name'.", 1)
         self.document.Sheets.getByIndex(1).getCellRangeByName("B1").setString("pending")

@@ -28,6 +28,10 @@ public:
     Dual temperature(Key key) { return seeded(key, Reader::temperature(key)); }
     Dual reservoir_temperature(Key key) { return seeded(key, Reader::reservoir_temperature(key)); }
     Dual pressure(Key key, double usual) { return seeded(key, Reader::pressure(key, usual)); }
+    Dual pressure_of(const functions::State& state, double T, Key key, double usual)
+    {
+        return seeded(key, Reader::pressure_of(state, T, key, usual));
+    }
     Dual required_pressure(Key key) { return seeded(key, Reader::required_pressure(key)); }
     functions::Flow<Dual> heat(Key key) { return seeded(key, Reader::heat(key)); }
     functions::Flow<Dual> heat_capacity(Key key) { return seeded(key, Reader::heat_capacity(key)); }
