@@ -14,7 +14,8 @@ constexpr double touching = 0.02;
 
 } // namespace
 
-void remark_on_reservoir(Remarks& remarks, const TemperatureSpan& span, double heat, std::optional<double> T_reservoir)
+void remark_on_reservoir(Remarks& remarks, const TemperatureSpan& span, const Term<double>& entropy, const Term<double>& heat,
+                         std::optional<double> T_reservoir)
 {
     if (!T_reservoir) {
         remarks.note("no T_reservoir given, which GENERATION. needs");
@@ -22,15 +23,20 @@ void remark_on_reservoir(Remarks& remarks, const TemperatureSpan& span, double h
     }
     if (*T_reservoir < coldest_usual_reservoir)
         remarks.reserve("T_reservoir is " + shown_temperature(*T_reservoir) + "; were °C meant?");
+    if (generation(entropy, heat, *T_reservoir) < 0.0) {
+        remarks.reserve("the generation is negative: with this reservoir the duty cannot occur as specified");
+        return;
+    }
     // The sign of the total does not show that a part of the heat would have to pass from colder to warmer.
     const double hottest = std::max(span.start, span.end);
     const double coldest = std::min(span.start, span.end);
-    if (heat > 0.0 && hottest > *T_reservoir + touching)
-        remarks.reserve("temperatures cross: the system is at " + shown_temperature(hottest) + ", and heat does not pass to it by "
-                        "itself from the reservoir at " + shown_temperature(*T_reservoir) + "; the total's sign does not show that");
-    else if (heat < 0.0 && coldest < *T_reservoir - touching)
-        remarks.reserve("temperatures cross: the system is at " + shown_temperature(coldest) + ", and heat does not pass from it by "
-                        "itself to the reservoir at " + shown_temperature(*T_reservoir) + "; the total's sign does not show that");
+    const bool too_hot = heat.value > 0.0 && hottest > *T_reservoir + touching;
+    const bool too_cold = heat.value < 0.0 && coldest < *T_reservoir - touching;
+    if (too_hot || too_cold)
+        remarks.reserve("temperatures cross: the system is at " + shown_temperature(too_hot ? hottest : coldest)
+                        + ", and heat does not pass by itself " + (too_hot ? "to it from" : "from it to")
+                        + " the reservoir at " + shown_temperature(*T_reservoir)
+                        + "; the sign of the total does not show that");
 }
 
 } // namespace entropy_ledger::functions::views

@@ -87,7 +87,8 @@ struct Source : NumberView {
 };
 
 // What there is to say about the heat exchange with a reservoir at T_reservoir (K) while the system goes through `span`.
-void remark_on_reservoir(Remarks& remarks, const TemperatureSpan& span, double heat, std::optional<double> T_reservoir);
+void remark_on_reservoir(Remarks& remarks, const TemperatureSpan& span, const Term<double>& entropy, const Term<double>& heat,
+                         std::optional<double> T_reservoir);
 
 struct Check {
     static constexpr bool wants_words = true;
@@ -102,9 +103,7 @@ struct Check {
         Remarks remarks;
         process.remarks(remarks);
         if constexpr (requires { process.span(); })
-            remark_on_reservoir(remarks, process.span(), process.heat().value, T_reservoir);
-        if (T_reservoir && generation(process.entropy(), process.heat(), *T_reservoir) < 0.0)
-            remarks.reserve("the generation is negative: with this reservoir the duty cannot occur as specified");
+            remark_on_reservoir(remarks, process.span(), process.entropy(), process.heat(), T_reservoir);
         return remarks.summary();
     }
 };
