@@ -44,6 +44,8 @@ public:
     // Whether the argument is there; an empty cell counts as given and is refused when read.
     bool given(Key key) const;
 
+    bool has_unit(Key key) const { return cell(key).kind == Cell::Kind::text; }
+
     double temperature(Key key);                     // K, above 0
     double reservoir_temperature(Key key);           // K, above 0 and at most hottest_reservoir
     double pressure(Key key, double when_left_out);  // Pa, above 0

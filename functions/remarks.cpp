@@ -1,5 +1,7 @@
 #include "functions/remarks.hpp"
 
+#include "functions/wording.hpp"
+
 #include <algorithm>
 
 namespace entropy_ledger::functions {
@@ -33,6 +35,13 @@ void Remarks::source(std::string_view text) { add(sources_, std::string(text)); 
 void Remarks::note(std::string text) { add(notes_, std::move(text)); }
 void Remarks::reserve(std::string text) { add(reservations_, std::move(text)); }
 void Remarks::caution(std::string text) { add(cautions_, std::move(text)); }
+
+void Remarks::ask_about_celsius(std::string_view argument, double kelvin)
+{
+    constexpr double coldest_usual = 120.0; // K; common practice, no source
+    if (kelvin < coldest_usual)
+        reserve(std::string(argument) + " is " + shown_temperature(kelvin) + ", perhaps meant in °C");
+}
 
 std::string Remarks::sources() const { return joined(sources_); }
 

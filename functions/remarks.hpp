@@ -20,6 +20,9 @@ public:
     void reserve(std::string text); // the value is given, with this reservation
     void caution(std::string text); // the state can hurt someone
 
+    // A reservation where a temperature in K is so low that °C may have been meant.
+    void ask_about_celsius(std::string_view argument, double kelvin);
+
     // All sources, separated by "; ".
     std::string sources() const;
     // "ok", or "ok: " with the notes; with cautions or reservations those in its place, cautions first, under

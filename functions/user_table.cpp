@@ -20,8 +20,14 @@ enum class Keyword { none, substance, molar_mass, source, uncertainty, interpola
 std::string small_letters(std::string_view text)
 {
     std::string small;
-    for (const char c : text) {
-        if (c != ' ' && c != '-' && c != '_')
+    constexpr std::string_view no_break_space = "\u00a0";
+    for (std::size_t i = 0; i < text.size(); ++i) {
+        if (text.substr(i).starts_with(no_break_space)) {
+            ++i;
+            continue;
+        }
+        const char c = text[i];
+        if (c != ' ' && c != '-' && c != '_' && c != ':')
             small += c >= 'A' && c <= 'Z' ? static_cast<char>(c - 'A' + 'a') : c;
     }
     return small;
@@ -70,7 +76,7 @@ public:
         table_.citation = "own table in the sheet";
         table_.uncertainty = usual_uncertainty;
         if (block_.rows() > UserTable::most_rows)
-            fail("has more than " + shown(static_cast<double>(UserTable::most_rows)) + " rows");
+            throw BadRow{error_number(ErrorCode::unusable_argument), "the table has more than 100000 rows"};
         for (row_ = 0; row_ < block_.rows(); ++row_)
             read_row();
         row_ = block_.rows() - 1;
@@ -162,6 +168,8 @@ private:
             table_.molar_mass = quantity(1, "molar mass", si(dimensions::molar_mass), dimensions::molar_mass);
             if (!(table_.molar_mass > 0.0))
                 fail("the molar mass is not above 0");
+            if (table_.molar_mass > 10.0)
+                fail("the molar mass is " + shown(table_.molar_mass) + " kg/mol; write g/mol as a text: \"254.5 g/mol\"");
             break;
         case Keyword::uncertainty:
             table_.uncertainty = quantity(1, "uncertainty", si(dimensions::dimensionless), dimensions::dimensionless);
@@ -190,7 +198,7 @@ private:
     {
         const std::string typed = word(1, "state symbol");
         std::string symbol = normal_symbol(typed);
-        if (symbol.empty())
+        if (symbol.empty() || symbol.starts_with("l+g") || symbol.ends_with(','))
             fail("there is no such state symbol; write cr, l, g or, with a modification, cr,alpha");
         return symbol;
     }
@@ -203,6 +211,8 @@ private:
             if (phase.symbol == symbol)
                 fail("the phase " + symbol + " stands there twice");
         }
+        if (!table_.phases.empty() && aggregation_of_symbol(symbol) < table_.phases.back().aggregation)
+            fail("the phases stand in their order on heating: cr, then l, then g");
         if (!table_.phases.empty() && !transition_)
             fail("a transition is wanted between two phases");
         if (table_.phases.empty() && transition_)
@@ -224,30 +234,63 @@ private:
         temperature_unit_ = unit_of_heading(0, si(dimensions::temperature), dimensions::temperature, {});
         heat_capacity_unit_ = unit_of_heading(1, si(dimensions::specific_heat_capacity), dimensions::specific_heat_capacity,
                                               dimensions::molar_heat_capacity);
+        heat_capacity_in_si_ = heat_capacity_unit_ == si(dimensions::specific_heat_capacity);
     }
 
-    // The unit after the comma or in square brackets: "temperature, °C".
+    // The unit of a heading: what follows the quantity's name, whether after a comma, in brackets or after "in" or "/".
+    // A heading without one is in SI; one whose rest is no unit is refused, for a unit that is overlooked is a wrong figure.
     Unit unit_of_heading(std::size_t column, const Unit& usual, const Dimension& dimension, const Dimension& molar) const
     {
         const Cell c = cell(column);
         if (c.kind != Cell::Kind::text)
-            return usual;
-        std::string_view text = c.text;
-        const std::size_t bracket = text.rfind('[');
-        const std::size_t comma = text.rfind(',');
-        if (bracket != std::string_view::npos && text.ends_with(']'))
-            text = text.substr(bracket + 1, text.size() - bracket - 2);
-        else if (comma != std::string_view::npos)
-            text = text.substr(comma + 1);
-        else
+            fail("a heading is wanted in each column, with its unit: \"temperature, °C\" and \"heat capacity, kJ/(kg K)\"");
+        const std::string_view text = unit_part(c.text);
+        if (text.empty())
             return usual;
         Reason reason;
         const auto unit = read_unit(text, &reason);
         if (!unit)
-            fail("the heading: " + std::string(reason.text()));
+            fail("the heading's unit: " + std::string(reason.text()) + "; write it as in \"temperature, °C\"");
         if (unit->dimension != dimension && (molar == Dimension{} || unit->dimension != molar))
             fail("the heading has a unit of another kind");
         return *unit;
+    }
+
+    // The text after the name of the quantity, without the marks around it.
+    static std::string_view unit_part(std::string_view text)
+    {
+        const auto skip = [&](std::string_view word) {
+            if (text.size() >= word.size() && small_letters(text.substr(0, word.size())) == small_letters(word)) {
+                text.remove_prefix(word.size());
+                return true;
+            }
+            return false;
+        };
+        const auto trim = [&] {
+            while (!text.empty() && (text.front() == ' ' || text.front() == '\n'))
+                text.remove_prefix(1);
+            while (!text.empty() && (text.back() == ' ' || text.back() == '\n'))
+                text.remove_suffix(1);
+        };
+        trim();
+        for (const std::string_view name : {"temperature", "specific heat capacity", "heat capacity", "specific heat", "cp"}) {
+            if (skip(name))
+                break;
+        }
+        trim();
+        for (const std::string_view mark : {",", ";", ":", "in ", "/ "}) {
+            if (skip(mark))
+                break;
+        }
+        trim();
+        const bool brackets = text.size() >= 2
+            && ((text.front() == '[' && text.back() == ']') || (text.front() == '(' && text.back() == ')'));
+        if (brackets) {
+            text.remove_prefix(1);
+            text.remove_suffix(1);
+        }
+        trim();
+        return text;
     }
 
     void read_transition()
@@ -255,7 +298,9 @@ private:
         if (transition_)
             fail("two transitions without a phase between them");
         close_phase();
-        const double T = quantity(1, "temperature of transition", si(dimensions::temperature), dimensions::temperature);
+        const double T = quantity(1, "temperature of transition", temperature_unit_, dimensions::temperature);
+        if (cell(2).kind == Cell::Kind::number && !heat_capacity_in_si_)
+            fail("the enthalpy of transition needs its unit, such as \"210 kJ/kg\": the heading above has others than SI");
         const double enthalpy = quantity(2, "enthalpy of transition", si(dimensions::specific_energy),
                                          dimensions::specific_energy, dimensions::molar_energy);
         if (!(T > 0.0))
@@ -319,6 +364,7 @@ private:
     std::optional<Given> transition_;
     Unit temperature_unit_ = si(dimensions::temperature);
     Unit heat_capacity_unit_ = si(dimensions::specific_heat_capacity);
+    bool heat_capacity_in_si_ = true;
 };
 
 } // namespace
@@ -327,10 +373,10 @@ bool UserTable::looks_like_one(const Block& block)
 {
     if (block.columns() < 2 || block.rows() < 2)
         return false;
-    for (std::size_t row = 0; row < block.rows() && row < 64; ++row) {
-        const Cell first = block.at(row, 0);
-        if (!blank(first))
-            return keyword_of(first) != Keyword::none;
+    for (std::size_t row = 0; row < block.rows() && row < most_rows; ++row) {
+        const Keyword keyword = keyword_of(block.at(row, 0));
+        if (keyword == Keyword::phase || keyword == Keyword::substance)
+            return true;
     }
     return false;
 }

@@ -13,7 +13,8 @@
 //     280            | 1900                         at least two rows, temperatures ascending
 //     transition     | temperature | enthalpy taken up on heating, J/kg           between two phases
 //
-// Temperatures and heat capacities are numbers in the heading's units (K and J/(kg K) without one) or texts with a unit.
+// Temperatures and heat capacities are numbers in the heading's units (K and J/(kg K) without one) or texts with a unit. A
+// gas is ideal when the molar mass is given; without it its pressure does not count, and CHECK says so.
 #pragma once
 
 #include "functions/refusal.hpp"
@@ -30,7 +31,7 @@ public:
     // More rows than this are refused.
     static constexpr std::size_t most_rows = 100000;
 
-    // True when a range begins like a table: two columns or more, two rows or more, a keyword first.
+    // True for a range of two columns or more and two rows or more with the keyword phase or substance in its first column.
     static bool looks_like_one(const Block& block);
 
     explicit UserTable(const Block& block);

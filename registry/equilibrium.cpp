@@ -10,8 +10,9 @@ namespace entropy_ledger::registry {
 
 namespace {
 
-// Below this entropy of transition relative to the entropy itself, the Gibbs curves touch rather than cross.
-constexpr double touching = 1e-6;
+// Below this entropy of transition relative to the entropy itself, the Gibbs curves touch rather than cross. It also
+// covers the steps between the regions of IAPWS R7-97 (at most 4e-5), which are no change of phase.
+constexpr double touching = 1e-4;
 
 bool touch(const Phase& first, const Phase& second, double T, double p)
 {
@@ -101,33 +102,29 @@ std::optional<double> equilibrium_temperature(const Substance& substance, const 
 
 std::optional<double> equilibrium_pressure(const Phase& liquid, const Phase& gas, double T)
 {
-    const auto both_have_values = [&](double p) {
-        return limits_of(liquid, p).trust.contains(T) && limits_of(gas, p).trust.contains(T);
+    // The equilibrium temperature rises with pressure: above the wanted pressure it is above T, or there is none. So the
+    // window in which both phases have values at T, however narrow, is found by halving.
+    const auto gap = [&](double p) {
+        const Range l = limits_of(liquid, p).trust;
+        const Range g = limits_of(gas, p).trust;
+        return l.contains(T) && g.contains(T) ? 0 : !g.empty() && T < g.lower ? 1 : -1;
     };
     const auto difference = [&](double logarithm) {
         const double p = std::exp(logarithm);
         return gibbs_energy(liquid, T, p) - gibbs_energy(gas, T, p);
     };
-    // Steps of 1 %: a supersaturated vapour has values at least so far beyond its equilibrium.
-    constexpr double step = 0.01;
-    const double last = std::log(1e8);
-    double lower = 0.0;
-    bool lower_has_values = both_have_values(1.0);
-    for (double upper = step; upper <= last; upper += step) {
-        const bool upper_has_values = both_have_values(std::exp(upper));
-        if (lower_has_values && upper_has_values) {
-            const double at_lower = difference(lower);
-            const double at_upper = difference(upper);
-            if (at_lower * at_upper <= 0.0) {
-                const double p = std::exp(root(difference, lower, upper, at_lower, at_upper));
-                if (!touch(liquid, gas, T, p))
-                    return p;
-            }
-        }
-        lower = upper;
-        lower_has_values = upper_has_values;
+    double lower = 0.0, upper = std::log(1e8);
+    for (int i = 0; i < 200 && upper - lower > 1e-12; ++i) {
+        const double middle = 0.5 * (lower + upper);
+        const int where = gap(std::exp(middle));
+        // Above the critical pressure both are one fluid and the difference is zero.
+        const bool too_high = where > 0 || (where == 0 && !(difference(middle) > 0.0));
+        (too_high ? upper : lower) = middle;
     }
-    return std::nullopt;
+    const double p = std::exp(0.5 * (lower + upper));
+    if (gap(p) != 0 || touch(liquid, gas, T, p) || !(std::abs(difference(std::log(p))) <= 1e-6 * std::abs(enthalpy(gas, T, p))))
+        return std::nullopt;
+    return p;
 }
 
 } // namespace entropy_ledger::registry

@@ -74,7 +74,8 @@ inline const Source& source_of(const Phase& phase, double T, double p)
 inline bool is_ideal_gas(const Phase& phase)
 {
     const auto* polynomial = std::get_if<NasaPolynomial>(&phase.model);
-    return polynomial && polynomial->gas;
+    const auto* table = std::get_if<TabulatedHeatCapacity>(&phase.model);
+    return (polynomial && polynomial->gas) || (table && table->gas_constant > 0.0);
 }
 
 inline bool depends_on_pressure(const Phase& phase)
@@ -83,6 +84,8 @@ inline bool depends_on_pressure(const Phase& phase)
         [](const auto& model) {
             if constexpr (requires { model.gas; })
                 return model.gas;
+            else if constexpr (requires { model.gas_constant; })
+                return model.gas_constant > 0.0;
             else
                 return !model.holds_heat_capacity;
         },

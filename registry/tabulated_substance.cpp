@@ -8,7 +8,8 @@ namespace entropy_ledger::registry {
 namespace {
 
 constexpr double reference_temperature = 298.15; // K
-constexpr double bar = 1e5;                      // Pa; tables do not depend on pressure
+constexpr double bar = table_pressure;
+constexpr double molar_gas_constant = 8.314462618; // J/(mol K), SI Brochure, 9th ed. (2019)
 constexpr double widest_ratio = 1.5;             // of neighbouring knots: see TabulatedHeatCapacity
 
 // Slopes at the knots: no overshoot, zero at an extremum (Fritsch and Butland 1984, equation for unequal spacing as in
@@ -76,7 +77,7 @@ std::vector<TableKnot> make_knots(const TabulatedPhase& phase, bool smooth)
     }
     for (std::size_t i = 1; i < knots.size(); ++i) {
         const TableKnot& k = knots[i - 1];
-        const TabulatedHeatCapacity one{&k, nullptr, 1, knots[i].T, {}, nullptr};
+        const TabulatedHeatCapacity one{&k, nullptr, 1, knots[i].T, 0.0, {}, nullptr};
         knots[i].h = one.enthalpy(knots[i].T, bar);
         knots[i].s = one.entropy(knots[i].T, bar);
     }
@@ -100,12 +101,12 @@ Range trust_of_table(const TabulatedPhase& phase)
     if (phase.aggregation == Aggregation::liquid)
         return {0.9 * lower, 1.05 * upper};
     if (phase.aggregation == Aggregation::gas)
-        return {lower, upper};
+        return {0.97 * lower, upper};
     return {std::max(lower - std::max(0.03 * lower, 5.0), 0.5 * lower), upper + std::max(0.03 * upper, 5.0)};
 }
 
 TabulatedSubstance::TabulatedSubstance(SubstanceTable table)
-    : table_(std::move(table)), source_{"own table", table_.citation}
+    : table_(std::move(table)), source_{table_.citation, table_.citation}
 {
     const Uncertainty uncertainty{table_.uncertainty, 0.0005, 0.0005,
                                   table_.uncertainty_given ? Origin::stated : Origin::assigned,
@@ -119,8 +120,11 @@ TabulatedSubstance::TabulatedSubstance(SubstanceTable table)
         curve.knots = make_knots(given, table_.smooth);
         for (std::size_t k = 1; k < curve.knots.size(); ++k)
             curve.bounds.push_back(curve.knots[k].T);
+        const double gas_constant = given.aggregation == Aggregation::gas && table_.molar_mass > 0.0
+                                      ? molar_gas_constant / table_.molar_mass
+                                      : 0.0;
         const TabulatedHeatCapacity model{curve.knots.data(), curve.bounds.data(), curve.knots.size(), given.T.back(),
-                                          trust_of_table(given), &source_};
+                                          gas_constant, trust_of_table(given), &source_};
         phases_.push_back({given.symbol, given.aggregation, model, uncertainty, {}});
         const double T = i == 0 ? std::clamp(reference_temperature, given.T.front(), given.T.back())
                                 : given.transition_temperature;

@@ -55,7 +55,8 @@ private:
 };
 
 // How far beyond its table a phase may be used, assigned here: a crystal 3 % of the end temperature but at least 5 K; a
-// liquid 10 % below, since undercooling is its usual case, and 5 % above.
+// liquid 10 % below, since undercooling is its usual case, and 5 % above; a gas 3 % below
+// and nothing above.
 Range trust_of_table(const TabulatedPhase& phase);
 
 } // namespace entropy_ledger::registry

@@ -11,15 +11,14 @@ NOTICE = "Invented plant and figures, for demonstration. One working day."
 ANSWERS = ("This sheet answers: how much entropy does each heating, cooling, melting, freezing, boiling and condensing duty "
            "generate, how much work does that destroy, and can each duty happen as specified?")
 AMBIENT = 20.0           # °C
-MILK_HEAT_CAPACITY = 3.93  # kJ/(kg K): common practice, no source
 
 
 @dataclass(frozen=True)
 class Duty:
     item: str
     happens: str
-    process: str              # milk, sensible, phase, change, transfer, dissipation
-    amount: float             # kg; MJ for transfer and dissipation
+    process: str              # body, sensible, phase, change, transfer, dissipation
+    amount: float             # kg; kJ/K for a body; MJ for transfer and dissipation
     start: float              # °C
     end: float | None         # °C
     surroundings: float | None  # °C
@@ -29,16 +28,17 @@ class Duty:
 
 
 DUTIES = [
-    Duty("Milk reception", "Raw milk is cooled by ice water", "milk", 12000, 34, 6, 2),
+    Duty("Milk reception", "Raw milk is cooled by ice water", "sensible", 12000, 34, 6, 2, "whole milk(l)"),
     Duty("Ice bank, by day", "Ice melts and cools the ice water", "phase", 3950, 0, None, 2, "water", "cr → l"),
     Duty("Ice bank, by night", "Undercooled water freezes on the coil", "phase", 3950, -3, None, -9, "water", "l → cr"),
-    Duty("Pasteuriser, heating", "Milk is heated by condensing steam", "milk", 12000, 60, 74, 121),
-    Duty("Pasteuriser, cooling", "Milk is cooled by ice water", "milk", 12000, 20, 5, 2),
+    Duty("Pasteuriser, heating", "Milk is heated by condensing steam", "sensible", 12000, 60, 74, 121, "whole milk(l)"),
+    Duty("Pasteuriser, cooling", "Milk is cooled by ice water", "sensible", 12000, 20, 5, 2, "whole milk(l)"),
     Duty("Boiler", "Feed water becomes steam; heat from flue gas", "change", 900, 15, 121, 800, "water(l)", "water(g)", 2),
     Duty("Chimney", "Flue gas, taken as air, cools to ambient", "sensible", 1500, 220, 20, 20, "air(g)"),
     Duty("Cleaning water, heating", "Water is heated by condensing steam", "sensible", 3000, 15, 80, 121, "water(l)", "", 3),
     Duty("Cleaning water, drain", "Used water cools to ambient", "sensible", 3000, 60, 20, 20, "water(l)"),
     Duty("Cheese moulds", "Aluminium moulds are warmed by hot water", "sensible", 600, 18, 65, 70, "Al(cr)"),
+    Duty("Ripening racks", "Racks of known heat capacity are washed warm", "body", 240, 18, 60, 70),
     Duty("Whey evaporator", "Water boils under vacuum; heat from hot water", "phase", 500, 60, None, 75, "water", "l → g", 0.19946),
     Duty("Vapour condenser", "Vapour condenses 3 K below saturation", "phase", 500, 57, None, 25, "water", "g → l", 0.19946),
     Duty("Nitrogen for packing", "Cold nitrogen gas warms to the hall", "sensible", 200, -70, 15, 20, "N2(g)"),

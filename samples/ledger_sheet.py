@@ -19,7 +19,7 @@ COLUMNS = [
     ("What happens", 7200, None, False),
     ("State", 3100, None, True),
     ("Amount", 1700, "#,##0", True),
-    ("kg or\nMJ", 1200, None, True),
+    ("Unit", 1200, None, True),
     ("From,\n°C", 1400, "0.0", True),
     ("To,\n°C", 1400, "0.0", True),
     ("Surround-\nings, °C", 1900, "0.0", True),
@@ -45,7 +45,7 @@ def row_formulas(duty: dairy.Duty, r: int) -> dict[str, str]:
     amount, start, end, around = f"E{r}", kelvin(f"G{r}"), kelvin(f"H{r}"), kelvin(f"I{r}")
     pressure = f"J{r}*100000"
     system = {
-        "milk": ("BODY", f"{amount}*MilkHeatCapacity*1000;{start};{end}", ""),
+        "body": ("BODY", f"{amount}*1000;{start};{end}", ""),
         "sensible": ("SENSIBLE", f"D{r};{start};{end};{amount}", f";{pressure}"),
         "phase": ("PHASE", f'"{duty.substance}";"{duty.to.partition(" → ")[0]}";"{duty.to.partition(" → ")[2]}";'
                            f"{start};{amount}", f";{pressure}"),
@@ -97,18 +97,12 @@ class LedgerSheet(SampleDocument):
         sheet.Rows.getByIndex(0).Height = 900
         self.put(sheet, "A2", dairy.NOTICE, "LedgerCaution").IsTextWrapped = False
         self.merged_text(sheet, f"A3:{LAST}3", dairy.ANSWERS, "LedgerNote", 600)
-        for r, (label, figure, code, origin) in enumerate([
-                ("Ambient temperature, °C", dairy.AMBIENT, "0.0", "invented"),
-                ("Heat capacity of milk, kJ/(kg K)", dairy.MILK_HEAT_CAPACITY, "0.00", "common practice, no source")], 5):
-            sheet.getCellRangeByName(f"B{r}:C{r}").merge(True)
-            self.put(sheet, f"B{r}", label, "LedgerWords")
-            sheet.getCellRangeByName(f"C{r}").CellStyle = "LedgerWords"
-            self.put(sheet, f"D{r}", figure, "LedgerInput", code)
-            note = self.put(sheet, f"E{r}", origin, "LedgerNote")
-            note.IsTextWrapped, note.HoriJustify, note.ParaIndent = False, LEFT, 200
+        sheet.getCellRangeByName("B5:C5").merge(True)
+        self.put(sheet, "B5", "Ambient temperature, °C", "LedgerWords")
+        sheet.getCellRangeByName("C5").CellStyle = "LedgerWords"
+        self.put(sheet, "D5", dairy.AMBIENT, "LedgerInput", "0.0")
         self.put(sheet, "B7", "Shaded cells are inputs; change one and the ledger follows.", "LedgerNote").IsTextWrapped = False
         self.name("Ambient", "D5")
-        self.name("MilkHeatCapacity", "D6")
         for index, (heading, _, _, _) in enumerate(COLUMNS):
             sheet.getCellByPosition(index, HEADING_ROW - 1).setString(heading)
         sheet.getCellRangeByName(f"A{HEADING_ROW}:{LAST}{HEADING_ROW}").CellStyle = "LedgerHeading"
@@ -154,9 +148,9 @@ class LedgerSheet(SampleDocument):
 
     def make_row(self, number: int, duty: dairy.Duty, r: int) -> None:
         sheet = self.ledger
-        state = {"milk": "milk", "phase": f"{duty.substance}, {duty.to}", "change": f"{duty.substance} → {duty.to}"}.get(
+        state = {"body": "racks", "phase": f"{duty.substance}, {duty.to}", "change": f"{duty.substance} → {duty.to}"}.get(
             duty.process, duty.substance)
-        unit = "MJ" if duty.process in ("transfer", "dissipation") else "kg"
+        unit = {"transfer": "MJ", "dissipation": "MJ", "body": "kJ/K"}.get(duty.process, "kg")
         has_pressure = duty.process in ("sensible", "phase", "change")
         contents = [number, duty.item, duty.happens, state, duty.amount, unit, duty.start, duty.end, duty.surroundings,
                     (duty.pressure or 1.0) if has_pressure else None]

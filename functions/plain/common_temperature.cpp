@@ -1,4 +1,5 @@
 // Mean and common temperatures.
+#include "functions/plain/heat_and_entropy.hpp"
 #include "functions/plain/plain.hpp"
 #include "functions/whole_reader.hpp"
 
@@ -9,8 +10,7 @@ namespace entropy_ledger::functions::plain {
 Result temperature_mean(const Entry& entry, std::span<const Cell> cells)
 {
     Reader reader(entry, cells, false);
-    const double heat = reader.heat(Key::heat_balance).value;
-    const double entropy = reader.entropy(Key::entropy_change).value;
+    const auto [heat, entropy] = heat_and_entropy(reader);
     if (reader.refused())
         return reader.refusal().error;
     const double T = heat / entropy;

@@ -93,8 +93,11 @@ Result temperature_final(const Entry& entry, std::span<const Cell> cells)
     Reader reader(entry, cells, false);
     const State state = reader.state(Key::state);
     const double T_start = reader.temperature(Key::T_start);
-    const double heat = reader.heat(Key::heat_balance).value;
+    const Flow<double> flow = reader.heat(Key::heat_balance);
+    const double heat = flow.value;
     const Amount<double> amount = reader.amount(Key::amount, state.substance);
+    if (!reader.refused() && reader.has_unit(Key::heat_balance) && reader.has_unit(Key::amount) && flow.rate != amount.rate)
+        reader.refuse(ErrorCode::unusable_argument, Key::amount, [] { return "is no rate beside a rate, or the reverse"; });
     const double p = reader.pressure(Key::p, standard_pressure);
     if (reader.refused())
         return reader.refusal().error;

@@ -48,7 +48,7 @@ Result data_list(const Entry& entry, std::span<const Cell> cells)
     const std::string_view filter = reader.given(Key::filter) ? reader.text(Key::filter) : std::string_view();
     const std::string_view symbol_text = reader.given(Key::symbol) ? reader.text(Key::symbol) : std::string_view();
     const std::string symbol = normal_symbol(symbol_text);
-    if (!symbol_text.empty() && symbol.empty())
+    if (!symbol_text.empty() && (symbol.empty() || symbol.starts_with("l+g")))
         reader.refuse(ErrorCode::unusable_argument, Key::symbol, [] { return "is no state symbol"; });
     std::optional<double> T_within;
     if (reader.given(Key::T_within))
@@ -61,10 +61,11 @@ Result data_list(const Entry& entry, std::span<const Cell> cells)
     table.rows = 1;
     for (const char* heading : headings)
         table.cells.emplace_back(std::string(heading));
+    const registry::Substance* const named = filter.empty() ? nullptr : registry::find_substance(filter).substance;
     for (const registry::Substance& substance : registry::substances()) {
         for (const registry::Phase& phase : substance.phases) {
             const std::string state = shown_state(substance, phase);
-            if (!holds(state, filter) && !holds(substance.title, filter) && !holds(substance.formula, filter))
+            if (&substance != named && !holds(state, filter) && !holds(substance.title, filter) && !holds(substance.formula, filter))
                 continue;
             if (!symbol.empty() && !is_of_state(phase, symbol))
                 continue;

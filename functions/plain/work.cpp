@@ -1,3 +1,4 @@
+#include "functions/plain/heat_and_entropy.hpp"
 #include "functions/plain/plain.hpp"
 #include "functions/reader.hpp"
 
@@ -25,8 +26,7 @@ Result work_lost(const Entry& entry, std::span<const Cell> cells)
 Result work_available(const Entry& entry, std::span<const Cell> cells)
 {
     Reader reader(entry, cells, false);
-    const double heat = reader.heat(Key::heat_balance).value;
-    const double entropy = reader.entropy(Key::entropy_change).value;
+    const auto [heat, entropy] = heat_and_entropy(reader);
     const double T = reader.reservoir_temperature(Key::T_ambient);
     if (reader.refused())
         return reader.refusal().error;

@@ -44,7 +44,12 @@ public:
                value_of(entropy().value), "given in the sheet"});
     }
 
-    void remarks(Remarks& remarks) const { remarks.source("heat capacity given in the sheet, taken as constant"); }
+    void remarks(Remarks& remarks) const
+    {
+        remarks.source("heat capacity given in the sheet, taken as constant");
+        remarks.ask_about_celsius("T_start", value_of(T_start_));
+        remarks.ask_about_celsius("T_end", value_of(T_end_));
+    }
 
 private:
     Flow<Number> capacity_{1.0, false};

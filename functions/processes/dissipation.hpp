@@ -45,6 +45,7 @@ public:
     void remarks(Remarks& remarks) const
     {
         remarks.source("work given in the sheet");
+        remarks.ask_about_celsius("T", value_of(T_));
         if (value_of(work_.value) == 0.0)
             remarks.reserve("work is 0, or its cell is empty");
     }

@@ -38,6 +38,7 @@ public:
     void remarks(Remarks& remarks) const
     {
         remarks.source("heat given in the sheet");
+        remarks.ask_about_celsius("T", value_of(T_));
         if (value_of(heat_.value) == 0.0)
             remarks.reserve("heat is 0, or its cell is empty");
     }

@@ -140,6 +140,11 @@ void remark_on_change(const Substance& substance, const Point<double>& start, co
         if (point->vapour)
             remark_on_point(substance, {point->vapour, point->T, point->p}, remarks);
     }
+    for (const Point<double>* point : {&start, &end}) {
+        if (point->phase->aggregation == Aggregation::gas && !depends_on_pressure(*point->phase) && start.p != end.p)
+            remarks.reserve(shown_state(substance, *point->phase) + ": without a molar mass the table's gas does not depend on "
+                                                                    "pressure; the change of pressure is left out");
+    }
     const bool to_or_from_gas = (start.phase->aggregation == Aggregation::gas) != (end.phase->aggregation == Aggregation::gas);
     const Phase& gas = start.phase->aggregation == Aggregation::gas ? *start.phase : *end.phase;
     if (to_or_from_gas && is_ideal_gas(gas))

@@ -44,6 +44,8 @@ public:
     void remarks(Remarks& remarks) const
     {
         remarks.source("heat given in the sheet");
+        remarks.ask_about_celsius("T_from", value_of(T_from_));
+        remarks.ask_about_celsius("T_to", value_of(T_to_));
         if (value_of(heat_.value) == 0.0)
             remarks.reserve("heat is 0, or its cell is empty");
         if (value_of(entropy().value) < 0.0)

@@ -1,13 +1,14 @@
 #include "functions/views/views.hpp"
 
 #include <algorithm>
+#include <cmath>
 
 namespace entropy_ledger::functions::views {
 
 namespace {
 
-// Reservoirs colder than this are asked about: common practice, no source. K.
-constexpr double coldest_usual_reservoir = 120.0;
+// A heat so small beside the enthalpies that it is the difference of is none: a throttled stream exchanges no heat.
+constexpr double no_heat = 1e-4;
 
 // Temperatures this close do not count as crossing: rounding of °C to K. K.
 constexpr double touching = 0.02;
@@ -17,12 +18,9 @@ constexpr double touching = 0.02;
 void remark_on_reservoir(Remarks& remarks, const TemperatureSpan& span, const Term<double>& entropy, const Term<double>& heat,
                          std::optional<double> T_reservoir)
 {
-    if (!T_reservoir) {
-        remarks.note("no T_reservoir given, which GENERATION. needs");
+    if (!T_reservoir)
         return;
-    }
-    if (*T_reservoir < coldest_usual_reservoir)
-        remarks.reserve("T_reservoir is " + shown_temperature(*T_reservoir) + "; were °C meant?");
+    remarks.ask_about_celsius("T_reservoir", *T_reservoir);
     if (generation(entropy, heat, *T_reservoir) < 0.0) {
         remarks.reserve("the generation is negative: with this reservoir the duty cannot occur as specified");
         return;
@@ -30,6 +28,8 @@ void remark_on_reservoir(Remarks& remarks, const TemperatureSpan& span, const Te
     // The sign of the total does not show that a part of the heat would have to pass from colder to warmer.
     const double hottest = std::max(span.start, span.end);
     const double coldest = std::min(span.start, span.end);
+    if (std::abs(heat.value) <= no_heat * heat.magnitude)
+        return;
     const bool too_hot = heat.value > 0.0 && hottest > *T_reservoir + touching;
     const bool too_cold = heat.value < 0.0 && coldest < *T_reservoir - touching;
     if (too_hot || too_cold)

@@ -14,10 +14,13 @@
 #include "registry/number.hpp"
 #include "registry/source.hpp"
 
+#include <cmath>
 #include <cstddef>
 #include <span>
 
 namespace entropy_ledger::registry {
+
+inline constexpr double table_pressure = 1e5; // Pa; at which a table holds
 
 struct TableKnot {
     double T;           // K
@@ -31,17 +34,20 @@ struct TabulatedHeatCapacity {
     const double* bounds;    // inner ends of the intervals: count - 1 of them
     std::size_t count;       // at least 1
     double upper;            // K, end of the last interval
+    double gas_constant;     // J/(kg K), R over the molar mass, of an ideal gas; 0 for a condensed phase
     Range trust;             // K
     Source const* origin;
 
     static constexpr bool holds_heat_capacity = true;
 
     template <class Number>
-    Number entropy(const Number& T, const Number&) const
+    Number entropy(const Number& T, const Number& p) const
     {
-        return in_interval(T, [&](const TableKnot& k) -> Number {
+        const Number at_standard_pressure = in_interval(T, [&](const TableKnot& k) -> Number {
             return k.s + entropy_from_knot(k, T);
         });
+        using std::log;
+        return gas_constant > 0.0 ? at_standard_pressure - gas_constant * log(p / table_pressure) : at_standard_pressure;
     }
 
     template <class Number>

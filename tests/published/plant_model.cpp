@@ -101,7 +101,6 @@ const Melting meltings[] = {
     {"octadecane", 301.3, 242500.0},
     {"eicosane", 309.65, 247470.0},
     {"sodium sulfate decahydrate", 305.5, 252000.0},
-    {"calcium chloride hexahydrate", 302.9, 190800.0},
     {"lithium nitrate trihydrate", 303.3, 287000.0},
     {"erythritol", 390.25, 310500.0},
     {"palmitic acid", 335.7, 208200.0},

@@ -32,6 +32,24 @@ TEST(WetSteam, TheEquilibriumPressureIsTheSaturationPressure)
     }
 }
 
+TEST(WetSteam, ReachesNearToTheCriticalPoint)
+{
+    for (double T = 275.0; T < 646.0; T += 1.7) {
+        const Result h = call("DATA.ENTHALPY", {"water(l+g,x=0.5)", T});
+        EXPECT_EQ(code_of(h), 0) << T;
+    }
+    // 640 K: IAPWS R7-97 by python3-iapws 1.5.2.
+    EXPECT_NEAR(value("DATA.ENTHALPY", {"water(l+g,x=0.5)", 640.0}), 2118.20e3, 100.0);
+}
+
+TEST(WetSteam, ThrottlingExchangesNoHeat)
+{
+    const double T = value("TEMPERATURE.BALANCE", {"water", "l", "g", "10 bar"});
+    const double T_end = value("TEMPERATURE.BALANCE", {"water", "l", "g", "2 bar"});
+    const std::string check = words("CHECK.CHANGE", {"water(l)", T, "water(l+g,x=0.1172)", T_end, 1, "20 °C", "10 bar"});
+    EXPECT_EQ(check.find("temperatures cross"), std::string::npos) << check;
+}
+
 TEST(WetSteam, ChangesAddUp)
 {
     for (const std::string view : {"ENTROPY", "HEAT"}) {

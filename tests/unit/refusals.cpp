@@ -159,9 +159,11 @@ TEST(Check, NotesChangesThatDoNotOccurByThemselves)
 
 TEST(Check, AsksWhereAUnitMayBeMistaken)
 {
-    EXPECT_NE(words("CHECK.PHASE", {"water", "l", "cr", "-6 °C", 1, 10}).find("were °C meant"), std::string::npos);
+    EXPECT_NE(words("CHECK.PHASE", {"water", "l", "cr", "-6 °C", 1, 10}).find("perhaps meant in °C"), std::string::npos);
     EXPECT_NE(words("CHECK.SENSIBLE", {"N2(g)", 290, 300, 1, 280, 3}).find("another unit"), std::string::npos);
     EXPECT_NE(words("CHECK.SENSIBLE", {"N2(g)", 290, 300, 1, 310, "100 bar"}).find("ideal gas"), std::string::npos);
+    EXPECT_NE(words("CHECK.BODY", {1000, 20, 80}).find("perhaps meant in °C"), std::string::npos);
+    EXPECT_NE(words("CHECK.TRANSFER", {1000, 80, 20}).find("T_to"), std::string::npos);
     EXPECT_NE(words("CHECK.RESERVOIR", {0, 300}).find("its cell is empty"), std::string::npos);
 }
 

@@ -26,6 +26,9 @@ TEST(Work, AvailableAndLeast)
     EXPECT_DOUBLE_EQ(value("WORK.LEAST", {"100 kJ", 400.0, 300.0}), 1e5 * 100.0 / 400.0);
     EXPECT_EQ(value("WORK.LEAST", {"100 kJ", 300.0, 300.0}), 0.0);
     EXPECT_EQ(code_of(call("WORK.AVAILABLE", {"100 kJ", 200.0, 101325.0})), unusable);
+    EXPECT_EQ(code_of(call("WORK.AVAILABLE", {"1 kW", "2 J/K", 300.0})), unusable) << "a rate and no rate";
+    EXPECT_EQ(code_of(call("TEMPERATURE.MEAN", {"1 kJ", "2 W/K"})), unusable);
+    EXPECT_EQ(code_of(call("TEMPERATURE.FINAL", {"water(l)", 300.0, "1 kW", "1 kg"})), unusable);
 }
 
 TEST(Temperature, Mean)

@@ -135,6 +135,14 @@ INSTANTIATE_TEST_SUITE_P(Bad, OwnTableRefusal, ::testing::Values(
     BadTable{"two_transitions", changed(10, {text("transition"), number(301), number(1)}), "row 11 of the table: two transitions"},
     BadTable{"same_phase_twice", changed(10, {text("phase"), text("cr")}), "row 11 of the table: the phase cr stands there twice"},
     BadTable{"bad_symbol", changed(5, {text("phase"), text("plasma")}), "row 6 of the table"},
+    BadTable{"heading_without_reading", changed(11, {text("temperature, °C"), text("heat capacity, kilo-something")}), "row 12 of the table: the heading's unit"},
+    BadTable{"heading_in_one_column", changed(11, {text("temperature, °C"), empty()}), "row 12 of the table: a heading is wanted in each column"},
+    BadTable{"wrong_order", {{text("phase"), text("l")}, {number(280), number(2000)}, {number(300), number(2000)},
+                             {text("transition"), number(300), number(1)}, {text("phase"), text("cr")}, {number(300), number(1000)},
+                             {number(320), number(1000)}}, "row 5 of the table: the phases stand in their order"},
+    BadTable{"molar_mass_in_grams", changed(1, {text("molar mass"), number(254.5)}), "row 2 of the table: the molar mass is 254.5 kg/mol"},
+    BadTable{"title_above", {{text("My wax")}, {text("phase"), text("l")}, {number(280), number(2000)}, {number(300), number(2000)}},
+             "row 1 of the table: neither a keyword"},
     BadTable{"bad_heading", changed(6, {text("temperature, bar"), text("heat capacity")}), "row 7 of the table: the heading"},
     BadTable{"bad_uncertainty", changed(3, {text("uncertainty"), number(3)}), "row 4 of the table: the uncertainty is relative"},
     BadTable{"bad_interpolation", changed(4, {text("interpolation"), text("wild")}), "row 5 of the table: the interpolation"},
@@ -144,6 +152,42 @@ INSTANTIATE_TEST_SUITE_P(Bad, OwnTableRefusal, ::testing::Values(
                                        {text("transition"), number(300), number(1)}}, "a transition is not followed"},
     BadTable{"no_phase", {{text("substance"), text("x")}, {text("source"), text("y")}}, "the table holds no phase"}),
     [](const auto& test) { return std::string(test.param.what); });
+
+TEST(OwnTable, UnitsOfHeadingsAsDataSheetsWriteThem)
+{
+    for (const char* heading : {"heat capacity, kJ/(kg K)", "heat capacity [kJ/(kg K)]", "heat capacity (kJ/(kg K))",
+                                "Heat capacity in kJ/(kg K)", "cp kJ/(kg K)", "cp / kJ/(kg K)", "specific heat; kJ/kg/K",
+                                "heat capacity [kJ/(kg K)] "}) {
+        for (const char* temperature : {"temperature, °C", "temperature (°C)", "Temperature in °C", "temperature / °C"}) {
+            const Range own = table({{text("phase"), text("l")}, {text(temperature), text(heading)}, {number(20), number(2)},
+                                     {number(80), number(2)}});
+            EXPECT_NEAR(value("HEAT.SENSIBLE", {own, "30 °C", "40 °C", 1}), 20000.0, 1e-8) << temperature << heading;
+        }
+    }
+}
+
+TEST(OwnTable, AGasIsIdealWhenItsMolarMassIsGiven)
+{
+    const Rows gas{{text("molar mass"), text("28 g/mol")}, {text("phase"), text("g")}, {number(250), number(1040)},
+                   {number(500), number(1060)}};
+    const Range own = table(gas);
+    EXPECT_NEAR(value("ENTROPY.CHANGE", {own, 300, own, 300, 1, "1 bar", "10 bar"}), -8.314462618 / 0.028 * std::log(10.0), 1e-9);
+    const Range nameless = table({gas.begin() + 1, gas.end()});
+    EXPECT_EQ(value("ENTROPY.CHANGE", {nameless, 300, nameless, 300, 1, "1 bar", "10 bar"}), 0.0);
+    EXPECT_NE(words("CHECK.CHANGE", {nameless, 300, nameless, 300, 1, missing(), "1 bar", "10 bar"}).find("molar mass"),
+              std::string::npos);
+}
+
+TEST(OwnTable, BoilingAtTheFirstRowOfTheGas)
+{
+    for (int t = 5; t < 400; ++t) {
+        const double T = t + 273.15;
+        const Range own = table({{text("phase"), text("l")}, {number(T - 60), number(4000)}, {number(T), number(4000)},
+                                 {text("transition"), number(T), number(2257e3)}, {text("phase"), text("g")},
+                                 {number(T), number(2000)}, {number(T + 200), number(2000)}});
+        EXPECT_NEAR(value("TEMPERATURE.BALANCE", {own, "l", "g"}), T, 1e-9) << t;
+    }
+}
 
 TEST(OwnTable, AnErrorCellPassesThrough)
 {

@@ -1,0 +1,24 @@
+// A heat and an entropy change that belong together.
+#pragma once
+
+#include "functions/reader.hpp"
+
+namespace entropy_ledger::functions::plain {
+
+struct HeatAndEntropy {
+    double heat;    // J or W
+    double entropy; // J/K or W/K
+};
+
+// Reads both; refuses a heat in J beside an entropy in W/K, or the reverse, where both say their units.
+inline HeatAndEntropy heat_and_entropy(Reader& reader)
+{
+    const Flow<double> heat = reader.heat(Key::heat_balance);
+    const Flow<double> entropy = reader.entropy(Key::entropy_change);
+    if (!reader.refused() && reader.has_unit(Key::heat_balance) && reader.has_unit(Key::entropy_change)
+        && heat.rate != entropy.rate)
+        reader.refuse(ErrorCode::unusable_argument, Key::entropy_change, [] { return "is no rate beside a rate, or the reverse"; });
+    return {heat.value, entropy.value};
+}
+
+} // namespace entropy_ledger::functions::plain
