@@ -10,16 +10,6 @@ namespace entropy_ledger::registry {
 
 namespace {
 
-// Below this entropy of transition relative to the entropy itself, the Gibbs curves touch rather than cross. It also
-// covers the steps between the regions of IAPWS R7-97 (at most 4e-5), which are no change of phase.
-constexpr double touching = 1e-4;
-
-bool touch(const Phase& first, const Phase& second, double T, double p)
-{
-    const double s = entropy(first, T, p);
-    return !(std::abs(entropy(second, T, p) - s) >= touching * std::abs(s));
-}
-
 std::optional<double> nominal_temperature(const Substance& substance, const Phase& first, const Phase& second)
 {
     for (const Transition& t : substance.transitions) {
@@ -51,6 +41,12 @@ double root(const Function& difference, double lower, double upper, double at_lo
 
 } // namespace
 
+bool are_one(const Phase& first, const Phase& second, double T, double p)
+{
+    const double s = entropy(first, T, p);
+    return !(std::abs(entropy(second, T, p) - s) >= 1e-4 * std::abs(s));
+}
+
 std::optional<double> equilibrium_temperature(const Substance& substance, const Phase& first, const Phase& second,
                                               double p)
 {
@@ -68,7 +64,7 @@ std::optional<double> equilibrium_temperature(const Substance& substance, const 
     // Near the temperature at which the source lets the two meet.
     const auto nominal = nominal_temperature(substance, first, second);
     if (nominal && common.contains(*nominal)) {
-        if (touch(first, second, *nominal, p))
+        if (are_one(first, second, *nominal, p))
             return *nominal;
         for (double width = 1e-3; width <= 64.0; width *= 4.0) {
             const double lower = std::max(common.lower, *nominal - width);
@@ -91,7 +87,7 @@ std::optional<double> equilibrium_temperature(const Substance& substance, const 
         if (at_lower * at_upper <= 0.0) {
             // Above the critical pressure liquid and gas are one fluid: equal curves are no equilibrium of two phases.
             const double T = root(difference, lower, upper, at_lower, at_upper);
-            if (!touch(first, second, T, p))
+            if (!are_one(first, second, T, p))
                 return T;
         }
         lower = upper;
@@ -122,7 +118,7 @@ std::optional<double> equilibrium_pressure(const Phase& liquid, const Phase& gas
         (too_high ? upper : lower) = middle;
     }
     const double p = std::exp(0.5 * (lower + upper));
-    if (gap(p) != 0 || touch(liquid, gas, T, p) || !(std::abs(difference(std::log(p))) <= 1e-6 * std::abs(enthalpy(gas, T, p))))
+    if (gap(p) != 0 || are_one(liquid, gas, T, p) || !(std::abs(difference(std::log(p))) <= 1e-6 * std::abs(enthalpy(gas, T, p))))
         return std::nullopt;
     return p;
 }

@@ -21,6 +21,10 @@ Number gibbs_energy(const Phase& phase, const Number& T, const Number& p)
 std::optional<double> equilibrium_temperature(const Substance& substance, const Phase& first, const Phase& second,
                                               double p);
 
+// Whether two phases have the same properties at (T, p): one fluid above the critical pressure, or a transition without
+// enthalpy. Within 1e-4 of the entropy, which covers the steps between the regions of IAPWS R7-97 (at most 4e-5).
+bool are_one(const Phase& first, const Phase& second, double T, double p);
+
 // The pressure in Pa at which a liquid and a gas are in equilibrium at temperature T in K; otherwise as above. From 1 Pa to
 // 100 MPa.
 std::optional<double> equilibrium_pressure(const Phase& liquid, const Phase& gas, double T);

@@ -1,6 +1,7 @@
 // Where a substance comes to equilibrium after it has taken up a heat at constant pressure.
 #include "functions/plain/plain.hpp"
 #include "functions/reader.hpp"
+#include "registry/equilibrium.hpp"
 #include "registry/phase_sequence.hpp"
 
 #include <boost/math/tools/toms748_solve.hpp>
@@ -41,6 +42,14 @@ PhaseSequence surroundings(const registry::Substance& substance, const Phase& ph
                                          above->temperatures.end());
             break;
         }
+    }
+    // Above the critical pressure the gas goes on where the range of the liquid, the same fluid, ends.
+    const Phase& highest = substance.phases.back();
+    const Phase& last = *sequence.phases.back();
+    const double end = registry::limits_of(last, p).trust.upper;
+    if (&last != &highest && registry::limits_of(highest, p).trust.contains(end) && registry::are_one(last, highest, end, p)) {
+        sequence.phases.push_back(&highest);
+        sequence.temperatures.push_back(end);
     }
     return sequence;
 }

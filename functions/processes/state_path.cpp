@@ -1,7 +1,11 @@
 // The path of a change of state, step by step, for STEPS.
 #include "functions/processes/state_change.hpp"
 #include "functions/wording.hpp"
+#include "registry/equilibrium.hpp"
 #include "registry/phase_sequence.hpp"
+
+#include <algorithm>
+#include <optional>
 
 namespace entropy_ledger::functions {
 
@@ -52,7 +56,11 @@ public:
             step.what = step.heat > 0.0 ? "boiling" : "condensation";
             step.state += " → " + shown_point(substance_, to);
         } else if (from.phase != to.phase) {
-            step.what = name_of_change(from.phase->aggregation, to.phase->aggregation);
+            // Above the critical pressure liquid and gas are one fluid under two names.
+            step.what = from.T == to.T && from.phase->aggregation != to.phase->aggregation
+                            && registry::are_one(*from.phase, *to.phase, to.T, to.p)
+                          ? "no change (one fluid)"
+                          : name_of_change(from.phase->aggregation, to.phase->aggregation);
             step.state += " → " + shown_point(substance_, to);
         } else if (from.T == to.T) {
             step.what = "change of pressure";
@@ -73,6 +81,16 @@ private:
 
 bool has_value(const Phase& phase, double T, double p) { return limits_of(phase, p).trust.contains(T); }
 
+// A temperature at which both phases have the same properties: above the critical pressure, where the liquid's range ends.
+std::optional<double> shared_temperature(const Point<double>& start, const Point<double>& end)
+{
+    const registry::Range a = limits_of(*start.phase, start.p).trust;
+    const registry::Range b = limits_of(*end.phase, start.p).trust;
+    const double T = std::min(a.upper, b.upper);
+    const bool shared = a.contains(T) && b.contains(T) && registry::are_one(*start.phase, *end.phase, T, start.p);
+    return shared ? std::optional(T) : std::nullopt;
+}
+
 // From one phase to another at one pressure.
 void visit_phases(const StepMaker& step, const Substance& substance, const Point<double>& start,
                   const Point<double>& end, bool directly)
@@ -87,6 +105,12 @@ void visit_phases(const StepMaker& step, const Substance& substance, const Point
             step(before, after);
             here = after;
         }
+    } else if (const auto T = shared_temperature(start, end)) {
+        const Point<double> before{start.phase, *T, start.p};
+        const Point<double> after{end.phase, *T, start.p};
+        step(here, before);
+        step(before, after);
+        here = after;
     } else if (has_value(*end.phase, start.T, start.p)) {
         const Point<double> after{end.phase, start.T, start.p};
         step(here, after);

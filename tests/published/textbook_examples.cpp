@@ -184,7 +184,7 @@ TEST(MoranShapiro, QuenchedBar)
 
 // J. M. Smith, H. C. Van Ness, M. M. Abbott, Introduction to Chemical Engineering Thermodynamics, 7th ed., chapter 5.
 
-// 40 kg of steel at 450 °C, 0.5 kJ/(kg K), quenched in 150 kg of oil at 25 °C, 2.5 kJ/(kg K).
+// Example 5.4: 40 kg of steel at 450 °C, 0.5 kJ/(kg K), quenched in 150 kg of oil at 25 °C, 2.5 kJ/(kg K).
 TEST(SmithVanNessAbbott, SteelQuenchedInOil)
 {
     const double printed_T = 46.52, printed_steel = -16.33, printed_oil = 26.13, printed_total = 9.80; // °C, kJ/K
@@ -207,7 +207,7 @@ TEST(SmithVanNessAbbott, SteelQuenchedInOil)
                 -value("HEAT.BODY", {"375 kJ/K", "25 °C", common}), 1e-6);
 }
 
-// Methane expands reversibly and adiabatically from 550 K and 5 bar to 1 bar and 411.34 K. The book's heat capacity:
+// Example 5.3: methane expands reversibly and adiabatically from 550 K and 5 bar to 1 bar and 411.34 K. The book's heat capacity:
 // Cp/R = 1.702 + 9.081e-3 T - 2.164e-6 T^2.
 TEST(SmithVanNessAbbott, ReversibleAdiabaticExpansionOfMethane)
 {
@@ -225,7 +225,7 @@ TEST(SmithVanNessAbbott, ReversibleAdiabaticExpansionOfMethane)
 
 // P. W. Atkins, J. de Paula, Atkins' Physical Chemistry, 9th ed.
 
-// Chapter 3: argon at 25 °C and 1.00 bar in 0.500 dm3 expands to 1.000 dm3 and is heated to 100 °C.
+// Example 3.2: argon at 25 °C and 1.00 bar in 0.500 dm3 expands to 1.000 dm3 and is heated to 100 °C.
 TEST(Atkins, ArgonExpandsAndIsHeated)
 {
     const double printed = 0.173; // J/K

@@ -63,6 +63,21 @@ TEST(Temperature, FinalInvertsTheHeat)
     }
 }
 
+TEST(Temperature, FinalPassesAboveTheCriticalPressure)
+{
+    for (const char* p : {"230 bar", "300 bar", "800 bar"}) {
+        for (const double T_end : {500.0, 700.0, 750.0, 900.0}) {
+            const double heat = value("HEAT.CHANGE", {"water(l)", 300.0, T_end > 623.15 ? "water(g)" : "water(l)", T_end, 1.0, p});
+            // At the boundary of regions 2 and 3 the enthalpy steps by up to 125 J/kg.
+            EXPECT_NEAR(value("TEMPERATURE.FINAL", {"water(l)", 300.0, heat, 1.0, p}), T_end, 0.05) << p << ' ' << T_end;
+        }
+    }
+    const auto steps = call("STEPS.CHANGE", {"water(l)", 600, "water(g)", 800, 1, 850.0, "300 bar"});
+    const auto& table = std::get<functions::MixedTable>(steps);
+    for (std::size_t row = 1; row < table.rows; ++row)
+        EXPECT_NE(std::get<std::string>(table.cells[row * table.columns]), "boiling");
+}
+
 TEST(Temperature, FinalRestsAtThePhaseChange)
 {
     const double T_melting = value("TEMPERATURE.BALANCE", {"water", "cr", "l"});
