@@ -67,6 +67,29 @@ class Sheets(unittest.TestCase):
                     direct = evaluate(self.document, formula(function, **{key: f"C{row}"}), "F1")
                     self.assertEqual(what_if, direct)
 
+    def test_multiple_operations_reach_functions_of_ranges_and_tables(self):
+        # The ranges hold formulas of the varied cell; a range that holds the varied cell itself Calc refuses, for SUM too.
+        set_values(self.document, "C1:C2", [[1.0], [5.0]])
+        set_formula(self.document, "P1", '=C1&" mol"')
+        set_formula(self.document, "P2", '="3 mol"')
+        set_formula(self.document, "Q1", "=C1*100")
+        set_values(self.document, "Q2", [[300.0]])
+        set_values(self.document, "R1:R2", [[350.0], [290.0]])
+        calls = ["ENTROPY.TOTAL(Q1:Q2)", "HEAT.CLOSURE(Q1:Q2)", "TEMPERATURE.COMMON(Q1:Q2;R1:R2)", "ENTROPY.MIXING(P1:P2)",
+                 "HEAT.MIXING(P1:P2)", "CHECK.MIXING(P1:P2)", "SOURCE.MIXING(P1:P2)", "INDEX(STEPS.MIXING(P1:P2);2;7)",
+                 'INDEX(DATA.LIST("water";"l";C1+273);2;4)']
+        calls += [f"INDEX({formula(f, **{key: 'C1+270' if key.startswith('T') else 'C1*100'})[1:]};2;7)" for f, key in
+                  ((f, next(a.key for a in f.arguments if a.key in PAIRS and a.key != "material")) for f in FUNCTIONS
+                   if f.view == "STEPS" and f.method != "MIXING")]
+        for call in calls:
+            with self.subTest(call):
+                set_values(self.document, "C1", [[1.0]])
+                set_formula(self.document, "D1", f"={call}")
+                what_if = evaluate(self.document, "=TABLE(D1;C1;C2)", "E1")
+                set_values(self.document, "C1", [[5.0]])
+                self.assertEqual(what_if, value(cell(self.document, "D1")))
+                self.assertNotIsInstance(what_if, CellError)
+
     def test_a_two_way_what_if_table(self):
         set_values(self.document, "C1:D1", [[268.15, 260.15]])
         set_formula(self.document, "E1", '=GENERATION.PHASE("water";"l";"cr";C1;1;D1)')
