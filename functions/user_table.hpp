@@ -13,7 +13,8 @@
 //     280            | 1900                         at least two rows, temperatures ascending
 //     transition     | temperature | enthalpy taken up on heating, J/kg           between two phases
 //
-// Temperatures and heat capacities are numbers in the heading's units (K and J/(kg K) without one) or texts with a unit. A
+// Temperatures and heat capacities are numbers in the heading's units (K and J/(kg K) without one) or texts with a unit. The
+// enthalpy of a transition is a number in J/kg only while the heading above has SI units; else it says its unit. A
 // gas is ideal when the molar mass is given; without it its pressure does not count, and CHECK says so.
 #pragma once
 

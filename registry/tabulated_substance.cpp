@@ -1,5 +1,7 @@
 #include "registry/tabulated_substance.hpp"
 
+#include "registry/constants.hpp"
+
 #include <algorithm>
 #include <cmath>
 
@@ -9,7 +11,6 @@ namespace {
 
 constexpr double reference_temperature = 298.15; // K
 constexpr double bar = table_pressure;
-constexpr double molar_gas_constant = 8.314462618; // J/(mol K), SI Brochure, 9th ed. (2019)
 constexpr double widest_ratio = 1.5;             // of neighbouring knots: see TabulatedHeatCapacity
 
 // Slopes at the knots: no overshoot, zero at an extremum (Fritsch and Butland 1984, equation for unequal spacing as in

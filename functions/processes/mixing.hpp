@@ -4,13 +4,12 @@
 
 #include "functions/processes/step.hpp"
 #include "functions/whole_reader.hpp"
+#include "registry/constants.hpp"
 
 #include <algorithm>
 #include <vector>
 
 namespace entropy_ledger::functions::processes {
-
-inline constexpr double molar_gas_constant = 8.314462618; // J/(mol K), exact to the digits shown: SI Brochure, 9th ed. (2019)
 
 template <class Number>
 class Mixing {
@@ -84,7 +83,7 @@ private:
         using std::log;
         if (!(value_of(component.moles) > 0.0))
             return Number(0.0);
-        return molar_gas_constant * component.moles * log(total_ / component.moles);
+        return registry::molar_gas_constant * component.moles * log(total_ / component.moles);
     }
 
     std::vector<Component> components_;
