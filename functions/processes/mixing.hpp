@@ -55,7 +55,11 @@ public:
                    value_of(part(component)), {}});
     }
 
-    void remarks(Remarks& remarks) const { remarks.source("amounts given in the sheet; ideal mixing"); }
+    void remarks(Remarks& remarks) const
+    {
+        remarks.source("amounts given in the sheet; ideal mixing");
+        remarks.note("the components are taken to mix ideally; whether they do is not checked");
+    }
 
 private:
     struct Component {
