@@ -36,6 +36,18 @@ void Reader::keep(double error, std::string reason)
     refusal_ = {error, std::move(reason)};
 }
 
+void Reader::pass_error_on(Key key)
+{
+    keep(cell(key).number, wants_words_ ? std::string(name(key)) + ": the cell holds an error" : std::string());
+}
+
+void Reader::require_same_rate(Key first, bool first_is_rate, Key second, bool second_is_rate)
+{
+    const auto has_unit = [&](Key key) { return cell(key).kind == Cell::Kind::text; };
+    if (!refused_ && has_unit(first) && has_unit(second) && first_is_rate != second_is_rate)
+        refuse(ErrorCode::unusable_argument, second, [] { return "is no rate beside a rate, or the reverse"; });
+}
+
 bool Reader::given(Key key) const { return cell(key).kind != Cell::Kind::missing; }
 
 // The plain number or the text with its unit; checks that it is there and readable.
@@ -51,7 +63,7 @@ Quantity Reader::quantity(Key key, std::string_view wanted)
         refuse(ErrorCode::unusable_argument, key, [] { return "is not a finite number"; });
         return {};
     case Cell::Kind::error:
-        keep(c.number, wants_words_ ? std::string(name(key)) + ": the cell holds an error" : std::string());
+        pass_error_on(key);
         return {};
     case Cell::Kind::text: {
         const auto read = read_quantity(c.text);
@@ -172,7 +184,7 @@ double Reader::number(Key key)
     if (c.kind == Cell::Kind::number && std::isfinite(c.number))
         return c.number;
     if (c.kind == Cell::Kind::error)
-        keep(c.number, wants_words_ ? std::string(name(key)) + ": the cell holds an error" : std::string());
+        pass_error_on(key);
     else if (c.kind == Cell::Kind::text) {
         const auto read = read_quantity(c.text);
         const auto* q = std::get_if<Quantity>(&read);
@@ -189,7 +201,7 @@ std::string_view Reader::text(Key key)
     if (c.kind == Cell::Kind::text)
         return c.text;
     if (c.kind == Cell::Kind::error)
-        keep(c.number, wants_words_ ? std::string(name(key)) + ": the cell holds an error" : std::string());
+        pass_error_on(key);
     else if (c.kind == Cell::Kind::number)
         refuse(ErrorCode::unusable_argument, key, [] { return "is a number, or its cell is empty; a text is wanted"; });
     else

@@ -44,8 +44,6 @@ public:
     // Whether the argument is there; an empty cell counts as given and is refused when read.
     bool given(Key key) const;
 
-    bool has_unit(Key key) const { return cell(key).kind == Cell::Kind::text; }
-
     double temperature(Key key);                     // K, above 0
     double reservoir_temperature(Key key);           // K, above 0 and at most hottest_reservoir
     double pressure(Key key, double when_left_out);  // Pa, above 0
@@ -74,6 +72,9 @@ public:
     // Refuses unless `phase` has values at (T, p); `key` names the temperature argument.
     void admit(const registry::Substance* substance, const registry::Phase& phase, double T, double p, Key key);
 
+    // Refuses a rate beside what is none, where both arguments say their units.
+    void require_same_rate(Key first, bool first_is_rate, Key second, bool second_is_rate);
+
     // Keeps the first refusal. `words` makes the reason and is called only when it is wanted.
     template <class Words>
     void refuse(ErrorCode code, Key key, Words&& words)
@@ -87,6 +88,7 @@ private:
     const UserTable* table(Key key);
     std::string_view name(Key key) const;
     void keep(double error, std::string reason);
+    void pass_error_on(Key key); // of the argument's cell
     Quantity quantity(Key key, std::string_view unit_wanted);
     template <class Fits>
     Flow<double> flow(Key key, std::string_view wanted, Fits&& fits);

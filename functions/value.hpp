@@ -2,6 +2,7 @@
 #pragma once
 
 #include <bit>
+#include <cmath>
 #include <cstddef>
 #include <cstdint>
 #include <string>
@@ -23,6 +24,12 @@ enum class ErrorCode : std::uint16_t {
 inline double error_number(ErrorCode code)
 {
     return std::bit_cast<double>(std::uint64_t{0x7ff8'0000'0000'0000} | static_cast<std::uint16_t>(code));
+}
+
+// A number for a cell: what is not finite, as after an overflow, becomes an error.
+inline double finite_or_error(double x)
+{
+    return std::isfinite(x) ? x : error_number(ErrorCode::unusable_argument);
 }
 
 class UserTable;

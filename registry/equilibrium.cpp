@@ -1,10 +1,9 @@
 #include "registry/equilibrium.hpp"
 
-#include <boost/math/tools/toms748_solve.hpp>
+#include "registry/root.hpp"
 
 #include <algorithm>
 #include <cmath>
-#include <cstdint>
 
 namespace entropy_ledger::registry {
 
@@ -19,24 +18,6 @@ std::optional<double> nominal_temperature(const Substance& substance, const Phas
             return t.nominal_temperature;
     }
     return std::nullopt;
-}
-
-using Policy = boost::math::policies::policy<
-    boost::math::policies::domain_error<boost::math::policies::ignore_error>,
-    boost::math::policies::evaluation_error<boost::math::policies::ignore_error>>;
-
-template <class Function>
-double root(const Function& difference, double lower, double upper, double at_lower, double at_upper)
-{
-    if (at_lower == 0.0)
-        return lower;
-    if (at_upper == 0.0)
-        return upper;
-    std::uintmax_t steps = 100;
-    const auto tolerance = [](double a, double b) { return std::abs(b - a) <= 4e-16 * std::abs(a); };
-    const auto bracket
-        = boost::math::tools::toms748_solve(difference, lower, upper, at_lower, at_upper, tolerance, steps, Policy());
-    return 0.5 * (bracket.first + bracket.second);
 }
 
 } // namespace
@@ -72,7 +53,7 @@ std::optional<double> equilibrium_temperature(const Substance& substance, const 
             const double at_lower = difference(lower);
             const double at_upper = difference(upper);
             if (at_lower * at_upper <= 0.0)
-                return root(difference, lower, upper, at_lower, at_upper);
+                return bracketed_root(difference, lower, upper, at_lower, at_upper).x;
         }
     }
 
@@ -86,7 +67,7 @@ std::optional<double> equilibrium_temperature(const Substance& substance, const 
         const double at_upper = difference(upper);
         if (at_lower * at_upper <= 0.0) {
             // Above the critical pressure liquid and gas are one fluid: equal curves are no equilibrium of two phases.
-            const double T = root(difference, lower, upper, at_lower, at_upper);
+            const double T = bracketed_root(difference, lower, upper, at_lower, at_upper).x;
             if (!are_one(first, second, T, p))
                 return T;
         }

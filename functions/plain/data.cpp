@@ -1,7 +1,7 @@
 #include "functions/plain/plain.hpp"
 #include "functions/reader.hpp"
 
-#include <cmath>
+#include <algorithm>
 #include <string>
 #include <utility>
 
@@ -26,7 +26,7 @@ Result property_of_state(const Entry& entry, std::span<const Cell> cells, bool w
     double value = property(phase, T, p);
     if (state.vapour)
         value += state.quality * (property(*state.vapour, T, p) - value);
-    return std::isfinite(value) ? value : error_number(ErrorCode::unusable_argument);
+    return finite_or_error(value);
 }
 
 // A state's range at 1 bar; for a state of several modifications from the first to the last.

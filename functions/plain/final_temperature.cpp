@@ -3,13 +3,9 @@
 #include "functions/reader.hpp"
 #include "registry/equilibrium.hpp"
 #include "registry/phase_sequence.hpp"
+#include "registry/root.hpp"
 
-#include <boost/math/tools/toms748_solve.hpp>
-
-#include <algorithm>
 #include <cmath>
-#include <cstdint>
-#include <optional>
 
 namespace entropy_ledger::functions::plain {
 
@@ -18,10 +14,6 @@ namespace {
 using registry::Phase;
 using registry::PhaseSequence;
 using registry::Range;
-
-using Policy = boost::math::policies::policy<
-    boost::math::policies::domain_error<boost::math::policies::ignore_error>,
-    boost::math::policies::evaluation_error<boost::math::policies::ignore_error>>;
 
 // The longest sequence of phases around `phase` that has equilibria at p: downwards as far as there are data, upwards
 // as far as there are data.
@@ -64,16 +56,9 @@ Search temperature_of(const Phase& phase, double h, double p, Range range, doubl
     const double at_upper = missing(range.upper);
     if (!(at_lower <= 0.0 && at_upper >= 0.0))
         return Search::out_of_range;
-    if (at_lower == 0.0 || at_upper == 0.0) {
-        T = at_lower == 0.0 ? range.lower : range.upper;
-        return Search::found;
-    }
-    std::uintmax_t steps = 200;
-    const auto close = [](double a, double b) { return std::abs(b - a) <= 4e-16 * std::abs(a); };
-    const auto bracket
-        = boost::math::tools::toms748_solve(missing, range.lower, range.upper, at_lower, at_upper, close, steps, Policy());
-    T = 0.5 * (bracket.first + bracket.second);
-    return std::abs(bracket.second - bracket.first) <= 1e-9 * T ? Search::found : Search::not_converged;
+    const registry::Root root = registry::bracketed_root(missing, range.lower, range.upper, at_lower, at_upper);
+    T = root.x;
+    return root.width <= 1e-9 * T ? Search::found : Search::not_converged;
 }
 
 // The temperature at which the sequence, each phase where it is stable, has the enthalpy h. Between the enthalpies of
@@ -105,8 +90,7 @@ Result temperature_final(const Entry& entry, std::span<const Cell> cells)
     const Flow<double> flow = reader.heat(Key::heat_balance);
     const double heat = flow.value;
     const Amount<double> amount = reader.amount(Key::amount, state.substance);
-    if (!reader.refused() && reader.has_unit(Key::heat_balance) && reader.has_unit(Key::amount) && flow.rate != amount.rate)
-        reader.refuse(ErrorCode::unusable_argument, Key::amount, [] { return "is no rate beside a rate, or the reverse"; });
+    reader.require_same_rate(Key::heat_balance, flow.rate, Key::amount, amount.rate);
     const double p = reader.pressure(Key::p, standard_pressure);
     if (reader.refused())
         return reader.refusal().error;

@@ -15,9 +15,7 @@ inline HeatAndEntropy heat_and_entropy(Reader& reader)
 {
     const Flow<double> heat = reader.heat(Key::heat_balance);
     const Flow<double> entropy = reader.entropy(Key::entropy_change);
-    if (!reader.refused() && reader.has_unit(Key::heat_balance) && reader.has_unit(Key::entropy_change)
-        && heat.rate != entropy.rate)
-        reader.refuse(ErrorCode::unusable_argument, Key::entropy_change, [] { return "is no rate beside a rate, or the reverse"; });
+    reader.require_same_rate(Key::heat_balance, heat.rate, Key::entropy_change, entropy.rate);
     return {heat.value, entropy.value};
 }
 

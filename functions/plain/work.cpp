@@ -6,12 +6,6 @@
 
 namespace entropy_ledger::functions::plain {
 
-namespace {
-
-Result finite_or_error(double x) { return std::isfinite(x) ? x : error_number(ErrorCode::unusable_argument); }
-
-} // namespace
-
 Result work_lost(const Entry& entry, std::span<const Cell> cells)
 {
     Reader reader(entry, cells, false);

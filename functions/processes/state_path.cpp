@@ -123,10 +123,6 @@ void visit_phases(const StepMaker& step, const Substance& substance, const Point
     step(here, end);
 }
 
-} // namespace
-
-namespace {
-
 // The part of a wet point that a path to or from `other` begins with: its vapour towards a gas, else its liquid.
 Point<double> dry(const Point<double>& point, const Point<double>& other)
 {

@@ -64,9 +64,9 @@ void remark_on_range(const Substance& substance, const Point<double>& point, Rem
     const double edge = below ? limits.fit.lower : limits.fit.upper;
     const registry::Uncertainty& u = point.phase->uncertainty;
     const double beyond = std::abs(point.T - edge);
-    const double grown = u.relative + beyond * (below ? u.growth_below : u.growth_above);
     if (beyond <= at_equilibrium)
         return;
+    const double grown = u.relative + beyond * (below ? u.growth_below : u.growth_above);
     const std::string usual = shown(100.0 * u.relative, 2), now = shown(100.0 * grown, 2);
     remarks.reserve(shown_state(substance, *point.phase) + " at " + shown_temperature(point.T) + " is "
                     + shown(beyond, 3) + " K " + (below ? "below" : "above") + " the range of its source ("
@@ -124,10 +124,10 @@ void remark_on_point(const Substance& substance, const Point<double>& point, Rem
     if (point.p < lowest_usual_pressure)
         remarks.reserve("the pressure is " + shown_pressure(point.p) + "; was another unit meant?");
     if (is_ideal_gas(*point.phase) && point.p > highest_ideal_pressure)
-        remarks.reserve(shown_state(substance, *point.phase) + " is taken as an ideal gas, also at "
+        remarks.reserve(state + " is taken as an ideal gas, also at "
                         + shown_pressure(point.p) + "; what a real gas differs by is not included");
     if (const std::string_view which = formulation_of(*point.phase, point.T, point.p); !which.empty())
-        remarks.note(shown_state(substance, *point.phase) + " by " + std::string(which));
+        remarks.note(state + " by " + std::string(which));
 }
 
 } // namespace

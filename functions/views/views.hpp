@@ -15,12 +15,6 @@
 
 namespace entropy_ledger::functions::views {
 
-// A number for a cell: an overflow is an error, never infinity.
-inline Result finite(double x)
-{
-    return std::isfinite(x) ? x : error_number(ErrorCode::unusable_argument);
-}
-
 // Whether the numbers of a process, and of its reservoir, fit into a double: a huge amount may overflow.
 template <class Process>
 bool is_finite(const Process& process, std::optional<double> T_reservoir)
@@ -39,7 +33,7 @@ struct Entropy : NumberView {
     template <class Process>
     static Result show(const Process& process, std::optional<double>)
     {
-        return finite(process.entropy().value);
+        return finite_or_error(process.entropy().value);
     }
 };
 
@@ -47,7 +41,7 @@ struct Heat : NumberView {
     template <class Process>
     static Result show(const Process& process, std::optional<double>)
     {
-        return finite(process.heat().value);
+        return finite_or_error(process.heat().value);
     }
 };
 
@@ -55,7 +49,7 @@ struct Generation : NumberView {
     template <class Process>
     static Result show(const Process& process, std::optional<double> T_reservoir)
     {
-        return finite(generation(process.entropy(), process.heat(), *T_reservoir));
+        return finite_or_error(generation(process.entropy(), process.heat(), *T_reservoir));
     }
 };
 
