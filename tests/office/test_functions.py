@@ -5,6 +5,7 @@ import zipfile
 
 from examples import FUNCTIONS, formula, prepare
 from office_session import OfficeSession, extensions_folder
+from office_test import DocumentTest
 from sheets import CellError, cell, set_formula, value
 
 
@@ -28,15 +29,7 @@ def fill(document) -> dict:
     return addresses
 
 
-class Functions(unittest.TestCase):
-    @classmethod
-    def setUpClass(cls):
-        cls.office = cls.enterClassContext(OfficeSession(extensions_folder()))
-
-    def setUp(self):
-        self.document = self.office.new_document()
-        self.addCleanup(self.office.close_all)
-
+class Functions(DocumentTest):
     def check_answer(self, function, text):
         answer = value(set_formula(self.document, "A1", text))
         self.assertNotIsInstance(answer, CellError, text)

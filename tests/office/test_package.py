@@ -6,16 +6,13 @@ import zipfile
 from pathlib import Path
 
 from office_session import OfficeSession, extensions_folder, properties
+from office_test import OfficeTest
 
 IDENTIFIER = "vnd.entropy-ledger"
 PROVIDER = "/singletons/com.sun.star.deployment.PackageInformationProvider"
 
 
-class Package(unittest.TestCase):
-    @classmethod
-    def setUpClass(cls):
-        cls.office = cls.enterClassContext(OfficeSession(extensions_folder()))
-
+class Package(OfficeTest):
     def test_the_office_lists_the_extension(self):
         provider = self.office.context.getByName(PROVIDER)
         versions = {identifier: version for identifier, version in provider.getExtensionList()}

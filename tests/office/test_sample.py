@@ -3,7 +3,7 @@
 import unittest
 from pathlib import Path
 
-from office_session import OfficeSession, extensions_folder
+from office_test import OfficeTest
 from sheets import CellError, value
 
 SAMPLES = Path(__file__).resolve().parents[2] / "samples"
@@ -24,17 +24,12 @@ def by_position(document):
     return found
 
 
-class AllSamples(unittest.TestCase):
-    @classmethod
-    def setUpClass(cls):
-        cls.office = cls.enterClassContext(OfficeSession(extensions_folder()))
-
+class AllSamples(OfficeTest):
     def test_recalculation_changes_nothing(self):
         samples = sorted(SAMPLES.glob("*.ods"))
         self.assertGreaterEqual(len(samples), 2)
         for sample in samples:
             document = self.office.load(sample)
-            self.addCleanup(self.office.close_all)
             stored = by_position(document)
             document.calculateAll()
             now = by_position(document)
@@ -48,14 +43,10 @@ class AllSamples(unittest.TestCase):
                         self.assertEqual(now[place], before)
 
 
-class DairyLedger(unittest.TestCase):
-    @classmethod
-    def setUpClass(cls):
-        cls.office = cls.enterClassContext(OfficeSession(extensions_folder()))
-
+class DairyLedger(OfficeTest):
     def setUp(self):
+        super().setUp()
         self.document = self.office.load(SAMPLES / "dairy-ledger.ods")
-        self.addCleanup(self.office.close_all)
         self.ledger = self.document.Sheets.getByName("Ledger")
 
     def row(self, item):

@@ -4,6 +4,7 @@ import unittest
 
 from examples import CELLS, FUNCTIONS, formula, prepare
 from office_session import OfficeSession, extensions_folder
+from office_test import DocumentTest
 from sheets import CellError, cell, evaluate, set_array_formula, set_formula, set_values, value, values
 
 # Arguments that take one cell each, with two values that both make sense, for ranges and multiple operations.
@@ -21,14 +22,9 @@ def varied(function):
     return key, [[float(v) if v.lstrip("-").replace(".", "").isdigit() else v] for v in PAIRS[key]]
 
 
-class Sheets(unittest.TestCase):
-    @classmethod
-    def setUpClass(cls):
-        cls.office = cls.enterClassContext(OfficeSession(extensions_folder()))
-
+class Sheets(DocumentTest):
     def setUp(self):
-        self.document = self.office.new_document()
-        self.addCleanup(self.office.close_all)
+        super().setUp()
         prepare(self.document)
 
     def test_array_formulas_give_what_single_cells_give(self):

@@ -2,20 +2,15 @@
 
 import unittest
 
-from office_session import OfficeSession, extensions_folder
+from office_test import DocumentTest
 from sheets import CellError, evaluate, set_formula, set_values, value
 
 UNUSABLE = CellError(502)
 
 
-class Total(unittest.TestCase):
-    @classmethod
-    def setUpClass(cls):
-        cls.office = cls.enterClassContext(OfficeSession(extensions_folder()))
-
+class Total(DocumentTest):
     def setUp(self):
-        self.document = self.office.new_document()
-        self.addCleanup(self.office.close_all)
+        super().setUp()
         set_values(self.document, "B1:B5", [[1.5], [""], [2.5], [""], [-1.0]])
 
     def total(self, arguments):

@@ -2,23 +2,9 @@
 
 Usage: nasa_data_refusals.py REGISTRY_DIR
 """
-import pathlib
-import subprocess
 import sys
-import tempfile
 
-COMPILER = pathlib.Path(sys.argv[1]) / "compile_data.py"
-
-COMMON = """source s
-  key S 1
-  citation Somebody, Somewhere, 2001
-
-uncertainty u
-  relative 0.01
-  growth 0.001
-  origin derived
-  reason scatter of a fit
-"""
+from data_compiler import Checks
 
 SUBSTANCE = """substance Xx
   formula Xx
@@ -49,30 +35,8 @@ SUBSTANCE = """substance Xx
   transition cr,alpha l 400
 """
 
-failures = []
-
-
-def compiled(substance, names="Xx = exium; examplium\n"):
-    with tempfile.TemporaryDirectory() as directory:
-        data = pathlib.Path(directory)
-        (data / "common.txt").write_text(COMMON, encoding="utf-8")
-        (data / "data.txt").write_text(substance, encoding="utf-8")
-        (data / "names.txt").write_text(names, encoding="utf-8")
-        out = data / "out.cpp"
-        run = subprocess.run([sys.executable, "-B", COMPILER, directory, out], capture_output=True, text=True)
-        return run.returncode, run.stderr.strip(), out.read_text() if out.exists() else ""
-
-
-def check(what, holds):
-    if not holds:
-        failures.append(what)
-
-
-def refused(wanted, old, new, names="Xx = exium\n"):
-    """With `old` replaced by `new` the data is refused with words that begin with `wanted`."""
-    assert old in SUBSTANCE
-    code, said, out = compiled(SUBSTANCE.replace(old, new, 1), names)
-    check(f"{new!r}: wanted {wanted!r}, said {said!r}", code != 0 and said.startswith(wanted) and not out)
+checks = Checks(sys.argv[1], SUBSTANCE, "Xx = exium; examplium\n")
+check, compiled, refused = checks.check, checks.compiled, checks.refused
 
 
 code, said, out = compiled(SUBSTANCE)
@@ -113,6 +77,4 @@ check(f"a name of two substances: {said}",
 code, said, out = compiled(OTHER.replace("formula Yy", "formula Xx"))
 check(f"a formula that is another's name: {said}", code == 0 and '{"Yy", 1},' in out and '{"Xx", 0},' in out)
 
-for failure in failures:
-    print(failure)
-sys.exit(bool(failures))
+checks.end()

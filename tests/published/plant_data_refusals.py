@@ -3,24 +3,10 @@
 Usage: plant_data_refusals.py REGISTRY_DIR
 """
 import math
-import pathlib
 import re
-import subprocess
 import sys
-import tempfile
 
-COMPILER = pathlib.Path(sys.argv[1]) / "compile_data.py"
-
-COMMON = """source s
-  key S 1
-  citation Somebody, Somewhere, 2001
-
-uncertainty u
-  relative 0.01
-  growth 0.001
-  origin derived
-  reason scatter of a fit
-"""
+from data_compiler import Checks
 
 SUBSTANCE = """substance wax
   source s
@@ -40,29 +26,8 @@ SUBSTANCE = """substance wax
   transition cr l 295 enthalpy 200000
 """
 
-failures = []
-
-
-def compiled(substance):
-    with tempfile.TemporaryDirectory() as directory:
-        data = pathlib.Path(directory)
-        (data / "common.txt").write_text(COMMON, encoding="utf-8")
-        (data / "data.txt").write_text(substance, encoding="utf-8")
-        out = data / "out.cpp"
-        run = subprocess.run([sys.executable, "-B", COMPILER, directory, out], capture_output=True, text=True)
-        return run.returncode, run.stderr.strip(), out.read_text() if out.exists() else ""
-
-
-def check(what, holds):
-    if not holds:
-        failures.append(what)
-
-
-def refused(wanted, old, new):
-    """With `old` replaced by `new` the data is refused with words that begin with `wanted`."""
-    assert old in SUBSTANCE, old
-    code, said, out = compiled(SUBSTANCE.replace(old, new, 1))
-    check(f"{new!r}: wanted {wanted!r}, said {said!r}", code != 0 and said.startswith(wanted) and not out)
+checks = Checks(sys.argv[1], SUBSTANCE)
+check, compiled, refused = checks.check, checks.compiled, checks.refused
 
 
 def intervals_of(text):
@@ -167,6 +132,4 @@ code, said, out = compiled(CONSTANT)
 check(f"an enthalpy beside models with their own: {said}",
       code != 0 and not out and said.startswith("data.txt:17: enthalpy: only between phases of model heat-cap"))
 
-for failure in failures:
-    print(failure)
-sys.exit(bool(failures))
+checks.end()
